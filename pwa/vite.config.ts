@@ -1,0 +1,59 @@
+/// <reference types="vitest/config" />
+import { fileURLToPath } from 'node:url';
+import react from '@vitejs/plugin-react';
+import browserslistToEsbuild from 'browserslist-to-esbuild';
+import { defineConfig } from 'vite';
+import { VitePWA } from 'vite-plugin-pwa';
+
+const api = process.env.API_URL ?? 'http://127.0.0.1:3000';
+const syncModelSource = fileURLToPath(new URL('../sync-model/src/', import.meta.url));
+
+export default defineConfig({
+  resolve: {
+    // the shared model straight from its source: no build step in dev and test, and hot reload
+    alias: [{ find: /^@harkmoor\/sync-model\/(.*)$/, replacement: `${syncModelSource}$1.ts` }],
+  },
+  build: {
+    target: browserslistToEsbuild(), // reads ../.browserslistrc
+    sourcemap: true,
+    manifest: true,
+    rolldownOptions: {
+      // @ionic/core and @ionic/react have no sideEffects field: without this every component ships
+      treeshake: {
+        moduleSideEffects: [{ test: /@ionic[\\/](core|react|react-router)[\\/].*\.js$/, sideEffects: false }],
+      },
+    },
+  },
+  server: { proxy: { '/api': api } },
+  plugins: [
+    react(),
+    VitePWA({
+      strategies: 'injectManifest',
+      srcDir: 'src',
+      filename: 'sw.ts',
+      injectRegister: false, // app/updates registers it with workbox-window
+      injectManifest: {
+        globPatterns: ['**/*.{js,css,html,woff2,json,svg,png,webmanifest}'],
+        globIgnores: ['.vite/**', '**/countries-10m*.json', '**/land-10m*.json'],
+        maximumFileSizeToCacheInBytes: 4_000_000,
+      },
+      manifest: {
+        name: 'Harkmoor field logbook',
+        short_name: 'Harkmoor',
+        description: 'Log what you hear, and what you do not, with no signal.',
+        start_url: '/field',
+        id: '/',
+        display: 'standalone',
+        background_color: '#FAF7F0',
+        theme_color: '#FAF7F0',
+        icons: [
+          { src: '/icons/harkmoor-192.png', sizes: '192x192', type: 'image/png', purpose: 'any' },
+          { src: '/icons/harkmoor-512.png', sizes: '512x512', type: 'image/png', purpose: 'any' },
+          { src: '/icons/harkmoor-maskable-512.png', sizes: '512x512', type: 'image/png', purpose: 'maskable' },
+          { src: '/icons/harkmoor.svg', sizes: 'any', type: 'image/svg+xml', purpose: 'any' },
+        ],
+      },
+    }),
+  ],
+  test: { environment: 'node', include: ['src/**/*.test.{ts,tsx}'], setupFiles: ['src/test-setup.ts'] },
+});

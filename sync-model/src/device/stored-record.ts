@@ -1,0 +1,45 @@
+import type { RecordState } from '../merge/record-state.js';
+import type { FieldsByType } from '../records/schemas.js';
+import type { RecordType } from '../records/record-types.js';
+import type { RefusalCode } from '../protocol/messages.js';
+import type { Stamp } from '../stamp/stamp.js';
+
+/** What the phone still has to tell about one field. */
+export type OwedField = {
+  /** Stamp of the value that the edit replaced, as this phone knew it; null in a record the server never had. */
+  readonly base: Stamp | null;
+  /** Set only where a later value from elsewhere has replaced ours before it was sent: it must still reach the history. */
+  readonly lost?: { readonly value: unknown; readonly stamp: Stamp };
+};
+
+/** The debt of a record: it stands in the record's own row, so that neither can be stored without the other. */
+export type Debt = {
+  /** Local order of the first unsent edit, ms of the device clock; never compared across devices. */
+  readonly since: number;
+  readonly fields: Readonly<Record<string, OwedField>>;
+  readonly status: 'waiting' | 'held' | 'refused';
+  /** Id of the parent that the server did not know. */
+  readonly needs?: string;
+  readonly code?: RefusalCode;
+  readonly message?: string;
+};
+
+/** A record as the phone keeps it. `seq` is 0 until the server has answered or sent it. */
+export type StoredRecord<T extends RecordType = RecordType> = RecordState & {
+  readonly clubId: string;
+  readonly type: T;
+  readonly id: string;
+  readonly ownerId: string | null;
+  readonly seq: number;
+  readonly fields: T extends keyof FieldsByType ? FieldsByType[T] : Readonly<Record<string, unknown>>;
+  readonly debt?: Debt;
+};
+
+/** What a person is told about one record. `sending` is known only to the running engine. */
+export type SendState = 'only-here' | 'sending' | 'sent' | 'needs-attention';
+
+export function sendStateOf(record: Pick<StoredRecord, 'debt'>, isInFlight: boolean): SendState {
+  if (!record.debt) return 'sent';
+  if (record.debt.status === 'refused') return 'needs-attention';
+  return isInFlight ? 'sending' : 'only-here';
+}
