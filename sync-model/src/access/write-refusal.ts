@@ -2,7 +2,11 @@ import type { Refusal } from '../protocol/messages.js';
 import type { Role } from '../records/member.js';
 import type { WritableType } from '../records/record-types.js';
 
-export type Writer = { readonly accountId: string; readonly role: Role; readonly clubKind: 'club' | 'my-log' };
+export type Writer = {
+  readonly accountId: string;
+  readonly role: Role;
+  readonly clubKind: 'club' | 'my-log';
+};
 
 /** A write as both sides see it: the phone before it offers a form, the server before it takes a change. */
 export type Write = {
@@ -29,7 +33,8 @@ export function writeRefusal(writer: Writer, write: Write): Refusal | null {
 }
 
 function listRefusal(writer: Writer, write: Write): Refusal | null {
-  const publishes = write.type === 'target-list' && 'publishedAt' in write.changed && write.changed.publishedAt !== null;
+  const publishes =
+    write.type === 'target-list' && 'publishedAt' in write.changed && write.changed.publishedAt !== null;
   const isPublished = write.list !== undefined && write.list.publishedAt !== null;
   if ((publishes || isPublished) && writer.clubKind === 'club' && !MAY_PUBLISH.includes(writer.role)) {
     return refuse('Published target lists are changed by organizers.');

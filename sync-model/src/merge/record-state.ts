@@ -18,7 +18,9 @@ export function stampOf(state: RecordState, field: string): Stamp {
 }
 
 /** Builds a record from fields with a stamp each; `at` is the earliest, so equal registers give equal records. */
-export function fromRegisters(registers: Readonly<Record<string, { value: FieldValue; stamp: Stamp }>>): RecordState {
+export function fromRegisters(
+  registers: Readonly<Record<string, { value: FieldValue; stamp: Stamp }>>,
+): RecordState {
   const names = Object.keys(registers).sort();
   let at: Stamp | undefined;
   for (const name of names) {

@@ -1,5 +1,12 @@
 import { z } from 'zod';
-import { azimuthDegSchema, commonFields, idSchema, instantSchema, nameSchema, notesSchema } from './common-fields.js';
+import {
+  azimuthDegSchema,
+  commonFields,
+  idSchema,
+  instantSchema,
+  nameSchema,
+  notesSchema,
+} from './common-fields.js';
 
 export const ANTENNA_KINDS = [
   'whip',

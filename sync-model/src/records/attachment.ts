@@ -6,7 +6,10 @@ export const attachmentSchema = z.strictObject({
   ...commonFields,
   receptionId: idSchema,
   kind: z.enum(['photo', 'sound']),
-  bytes: z.int().min(1).max(10 * 1024 * 1024),
+  bytes: z
+    .int()
+    .min(1)
+    .max(10 * 1024 * 1024),
   sha256: z.string().regex(/^[0-9a-f]{64}$/),
   takenAt: instantSchema.nullable(),
   caption: textSchema(200).nullable(),

@@ -6,7 +6,9 @@ export const instantSchema = z
   .min(Date.UTC(1990, 0, 1))
   .max(Date.UTC(2100, 0, 1));
 
-export const idSchema = z.string().regex(/^[0-9a-f]{8}-[0-9a-f]{4}-7[0-9a-f]{3}-[89ab][0-9a-f]{3}-[0-9a-f]{12}$/);
+export const idSchema = z
+  .string()
+  .regex(/^[0-9a-f]{8}-[0-9a-f]{4}-7[0-9a-f]{3}-[89ab][0-9a-f]{3}-[0-9a-f]{12}$/);
 
 const isNfc = (text: string) => text === text.normalize('NFC');
 // eslint-disable-next-line no-control-regex -- control characters are what is refused here

@@ -1,5 +1,11 @@
 import { z } from 'zod';
-import { commonFields, frequencyHzSchema, idSchema, instantSchema, meterReadingSchema } from './common-fields.js';
+import {
+  commonFields,
+  frequencyHzSchema,
+  idSchema,
+  instantSchema,
+  meterReadingSchema,
+} from './common-fields.js';
 
 export const noiseReadingSchema = z.strictObject({
   ...commonFields,

@@ -1,5 +1,12 @@
 import { z } from 'zod';
-import { commonFields, frequencyHzSchema, idSchema, instantSchema, nameSchema, notesSchema } from './common-fields.js';
+import {
+  commonFields,
+  frequencyHzSchema,
+  idSchema,
+  instantSchema,
+  nameSchema,
+  notesSchema,
+} from './common-fields.js';
 
 export const METER_KINDS = ['s', 'dbm', 'none'] as const;
 

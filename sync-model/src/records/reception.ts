@@ -14,9 +14,24 @@ export const BASES = ['round', 'planned', 'chance', 'swap', 'import'] as const;
 export const IDENTITIES = ['sure', 'tentative', 'unknown'] as const;
 export const NIL_REASONS = ['nothing', 'covered', 'noise', 'fault'] as const;
 /** Fields that *Same again* takes over; they count only once touched. */
-export const CARRIED_FIELDS = ['sinpo', 'rst', 'meter', 'noiseMeter', 'tuning', 'bandwidthHz', 'attenuationDb'] as const;
+export const CARRIED_FIELDS = [
+  'sinpo',
+  'rst',
+  'meter',
+  'noiseMeter',
+  'tuning',
+  'bandwidthHz',
+  'attenuationDb',
+] as const;
 
-const gradeSchema = z.union([z.literal(1), z.literal(2), z.literal(3), z.literal(4), z.literal(5), z.literal('X')]);
+const gradeSchema = z.union([
+  z.literal(1),
+  z.literal(2),
+  z.literal(3),
+  z.literal(4),
+  z.literal(5),
+  z.literal('X'),
+]);
 
 /** ITU-R SM.1135: strength, interference, noise, propagation disturbance, overall; X where not judged. */
 export const sinpoSchema = z.strictObject({

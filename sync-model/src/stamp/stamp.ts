@@ -41,7 +41,11 @@ export function stampWallMs(stamp: Stamp): number {
  * The stamp of a new edit: later than every stamp in `after`, and not before the wall clock. Hybrid logical
  * clock after Kulkarni et al. 2014, reduced to one writer.
  */
-export function nextStamp(deviceId: string, wallMs: number, after: readonly (Stamp | null | undefined)[]): Stamp {
+export function nextStamp(
+  deviceId: string,
+  wallMs: number,
+  after: readonly (Stamp | null | undefined)[],
+): Stamp {
   let best = { wallMs: clampWall(wallMs), counter: 0 };
   for (const stamp of after) {
     if (!stamp) continue;
