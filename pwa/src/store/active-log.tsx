@@ -56,8 +56,7 @@ export function ActiveLogProvider({ children }: { children: ReactNode }) {
   const openLog = state.kind === 'open' ? state.log : null;
   const actions = useMemo<ActiveLogActions>(() => {
     const again = async () => {
-      const log = await reopen();
-      if (log) show(log);
+      if (openLog) show(await openLog.reload());
     };
     return {
       startGuestLog: async () => show(await openGuestLog()),

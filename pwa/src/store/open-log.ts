@@ -21,6 +21,8 @@ export type OpenLog = {
   readonly role: Role;
   readonly card: ClubCard;
   readonly writer: LogWriter;
+  /** The same log with account, role and club as the database now tells them. */
+  reload(): Promise<OpenLog>;
 };
 
 export const SETTING = {
@@ -91,38 +93,48 @@ export function newClubState(club: KnownClub): ClubState {
 }
 
 async function openFrom(database: HarkmoorDatabase, account: KnownAccount | null): Promise<OpenLog> {
-  const myLogId = await readSetting<string>(database, SETTING.myLogId);
-  if (!myLogId) throw new Error('an opened log must know its My log');
-  const chosen = (await readSetting<string>(database, SETTING.clubId)) ?? myLogId;
-  const club = (await database.clubs.get(chosen)) ?? (await database.clubs.get(myLogId));
-  if (!club) throw new Error('an opened log must hold at least My log');
-  let clockOffsetMs = (await readSetting<number>(database, SETTING.clockOffsetMs)) ?? 0;
+  const shown = { clubId: '' };
   const deviceId = thisDeviceId();
   const writer = createLogWriter({
     database,
     deviceId,
     ownerId: account?.id ?? null,
-    clubId: () => club.clubId,
+    clubId: () => shown.clubId,
     deviceNowMs: () => Date.now(),
-    clockOffsetMs: () => clockOffsetMs,
+    clockOffsetMs: await watchClockOffset(database),
   });
-  // a round may learn the offset while this log is open; the next stamp must already use it
+  const read = async (): Promise<OpenLog> => {
+    const view = await readView(database);
+    shown.clubId = view.clubId;
+    return { ...view, database, deviceId, writer, reload: read };
+  };
+  return read();
+}
+
+type View = Pick<OpenLog, 'account' | 'myLogId' | 'clubId' | 'role' | 'card'>;
+
+/** Which club is shown, and as whom: the chosen one, or My log once the chosen one is gone. */
+async function readView(database: HarkmoorDatabase): Promise<View> {
+  const account = (await readSetting<KnownAccount>(database, SETTING.account)) ?? null;
+  const myLogId = await readSetting<string>(database, SETTING.myLogId);
+  if (!myLogId) throw new Error('an opened log must know its My log');
+  const chosen = (await readSetting<string>(database, SETTING.clubId)) ?? myLogId;
+  const club = (await database.clubs.get(chosen)) ?? (await database.clubs.get(myLogId));
+  if (!club) throw new Error('an opened log must hold at least My log');
+  return { account, myLogId, clubId: club.clubId, role: club.role, card: club.card };
+}
+
+/** A round may learn the offset while the log is open; the next stamp must already use it. */
+async function watchClockOffset(database: HarkmoorDatabase): Promise<() => number> {
+  let offsetMs = (await readSetting<number>(database, SETTING.clockOffsetMs)) ?? 0;
   database.settings.hook('updating', (changes, key) => {
-    if (key === SETTING.clockOffsetMs) clockOffsetMs = (changes as { value?: number }).value ?? clockOffsetMs;
+    const { value } = changes as { value?: number };
+    if (key === SETTING.clockOffsetMs && value !== undefined) offsetMs = value;
   });
   database.settings.hook('creating', (key, row) => {
-    if (key === SETTING.clockOffsetMs) clockOffsetMs = row.value as number;
+    if (key === SETTING.clockOffsetMs) offsetMs = row.value as number;
   });
-  return {
-    database,
-    deviceId,
-    account,
-    myLogId,
-    clubId: club.clubId,
-    role: club.role,
-    card: club.card,
-    writer,
-  };
+  return () => offsetMs;
 }
 
 export async function readSetting<T>(database: HarkmoorDatabase, name: string): Promise<T | undefined> {

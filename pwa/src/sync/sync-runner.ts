@@ -1,0 +1,116 @@
+import type { DevicePorts } from '@harkmoor/sync-model/device/ports';
+import { createSyncEngine } from '@harkmoor/sync-model/device/sync-engine';
+import { createDexieStore } from '../store/dexie-store';
+import type { OpenLog } from '../store/open-log';
+import { createHttpLink } from './http-link';
+import { afterWriteDelayMs, nextRoundDelayMs, type PauseReason, type RoundEnd } from './pacing';
+import { createTabLock } from './tab-lock';
+
+/** What the screens are told of the sending: kept by the tab that syncs, told to the others. */
+export type SyncStatus = {
+  readonly isRunning: boolean;
+  readonly inFlight: ReadonlySet<string>;
+  readonly lastContactAt: number | null;
+  readonly pause: PauseReason | null;
+};
+
+export const IDLE_STATUS: SyncStatus = {
+  isRunning: false,
+  inFlight: new Set(),
+  lastContactAt: null,
+  pause: null,
+};
+
+export type SyncRunner = {
+  /** Asks for a round now; safe to call at any time. */
+  request(): void;
+  stop(): void;
+};
+
+/** Runs rounds for an account's log until stopped. A guest's log has nobody to send to and gets no runner. */
+export function startSyncRunner(
+  log: OpenLog,
+  onStatus: (status: SyncStatus) => void,
+  onRoundDone: () => void,
+): SyncRunner {
+  const accountId = log.account?.id;
+  if (!accountId) throw new Error('a guest’s log is not sent');
+  const engine = createSyncEngine(portsOf(log, accountId), { deviceId: log.deviceId, accountId });
+  let status = IDLE_STATUS;
+  let timer: ReturnType<typeof setTimeout> | undefined;
+  let isStopped = false;
+  let failures = 0;
+
+  const tell = (change: Partial<SyncStatus>) => {
+    status = { ...status, ...change };
+    if (!isStopped) onStatus(status);
+  };
+  const wait = (delayMs: number | null) => {
+    clearTimeout(timer);
+    if (delayMs !== null && !isStopped) timer = setTimeout(() => void round(), delayMs);
+  };
+
+  async function round(): Promise<void> {
+    if (status.isRunning || isStopped) return;
+    clearTimeout(timer);
+    tell({ isRunning: true });
+    const watch = setInterval(() => tell({ inFlight: engine.inFlight() }), 250);
+    const end = await runSafely(() => engine.runRound());
+    clearInterval(watch);
+    failures = end.kind === 'paused' && end.reason !== 'busy' ? failures + 1 : 0;
+    const wasReached = end.kind === 'done';
+    tell({
+      isRunning: false,
+      inFlight: new Set(),
+      pause: end.kind === 'paused' ? end.reason : null,
+      lastContactAt: wasReached ? Date.now() : status.lastContactAt,
+    });
+    if (wasReached) onRoundDone();
+    wait(nextRoundDelayMs(end, failures, Math.random()));
+  }
+
+  const request = () => wait(0);
+  const stopListening = listenForReasons(request, log, () => wait(afterWriteDelayMs()));
+  request();
+  return {
+    request,
+    stop: () => {
+      isStopped = true;
+      clearTimeout(timer);
+      stopListening();
+    },
+  };
+}
+
+function portsOf(log: OpenLog, accountId: string): DevicePorts {
+  return {
+    store: createDexieStore(log.database),
+    link: createHttpLink(accountId),
+    clock: { deviceNowMs: () => Date.now() },
+    lock: createTabLock(log.database.name),
+  };
+}
+
+/** A fault of ours must never end the sending: it is shown, logged and tried again. */
+async function runSafely(work: () => Promise<RoundEnd>): Promise<RoundEnd> {
+  try {
+    return await work();
+  } catch (error) {
+    console.error('a sync round failed', error);
+    return { kind: 'paused', reason: 'failed' };
+  }
+}
+
+function listenForReasons(request: () => void, log: OpenLog, afterWrite: () => void): () => void {
+  const whenVisible = () => document.visibilityState === 'visible' && request();
+  addEventListener('online', request);
+  addEventListener('pageshow', request);
+  document.addEventListener('visibilitychange', whenVisible);
+  const stopWrites = log.writer.onWrite(afterWrite);
+  return () => {
+    removeEventListener('online', request);
+    removeEventListener('pageshow', request);
+    document.removeEventListener('visibilitychange', whenVisible);
+    stopWrites();
+  };
+}
