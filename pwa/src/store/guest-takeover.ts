@@ -1,6 +1,7 @@
 import type { StoredRecord } from '@harkmoor/sync-model/device/stored-record';
 import { WRITABLE_TYPES } from '@harkmoor/sync-model/records/record-types';
 import { Dexie } from 'dexie';
+import type { Draft } from './draft';
 import { GUEST_DATABASE_NAME, HarkmoorDatabase } from './database';
 import type { OpenLog } from './open-log';
 
@@ -40,7 +41,7 @@ function ownedCopy(record: StoredRecord, clubId: string, ownerId: string): Store
 async function writeWhereAbsent(
   log: OpenLog,
   records: readonly StoredRecord[],
-  drafts: Awaited<ReturnType<HarkmoorDatabase['drafts']['toArray']>>,
+  drafts: readonly Draft[],
 ): Promise<void> {
   const { database } = log;
   const tables = [...WRITABLE_TYPES.map((type) => database.recordTable(type)), database.drafts];
