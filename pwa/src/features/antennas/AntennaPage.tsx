@@ -1,0 +1,12 @@
+import { EmptyState } from '../../design/states/EmptyState';
+import { PageFrame } from '../../design/page/PageFrame';
+import { paths } from '../../platform/paths';
+
+/** Antenna. */
+export function AntennaPage() {
+  return (
+    <PageFrame title="Antenna" back={{ to: paths.antennas(), label: 'Antennas' }}>
+      <EmptyState title="Not here yet" sentence="This screen is being built. Nothing can be entered on it." />
+    </PageFrame>
+  );
+}

@@ -1,0 +1,12 @@
+import { EmptyState } from '../../design/states/EmptyState';
+import { PageFrame } from '../../design/page/PageFrame';
+import { paths } from '../../platform/paths';
+
+/** Import targets. */
+export function TargetImportPage() {
+  return (
+    <PageFrame title="Import targets" back={{ to: paths.targetLists(), label: 'Target lists' }}>
+      <EmptyState title="Not here yet" sentence="This screen is being built. Nothing can be entered on it." />
+    </PageFrame>
+  );
+}

@@ -1,0 +1,12 @@
+import { EmptyState } from '../../design/states/EmptyState';
+import { PageFrame } from '../../design/page/PageFrame';
+import { paths } from '../../platform/paths';
+
+/** Target lists. */
+export function TargetListsPage() {
+  return (
+    <PageFrame title="Target lists" back={{ to: paths.desk(), label: 'Desk' }}>
+      <EmptyState title="Not here yet" sentence="This screen is being built. Nothing can be entered on it." />
+    </PageFrame>
+  );
+}
