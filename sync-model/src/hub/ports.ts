@@ -3,6 +3,7 @@ import type { ReplacedValue } from '../merge/replaced-values.js';
 import type { ClubCard, FeedRecord } from '../protocol/messages.js';
 import type { Role } from '../records/member.js';
 import type { WritableType } from '../records/record-types.js';
+import type { Stamp } from '../stamp/stamp.js';
 
 export type HubRecord = RecordState & {
   readonly type: WritableType;
@@ -23,6 +24,9 @@ export type HistoryRow = ReplacedValue & {
   readonly at: number;
 };
 
+/** A value of one field, named by its stamp. */
+export type ReplacedKey = HubKey & { readonly field: string; readonly stamp: Stamp };
+
 export type HubClub = { readonly card: ClubCard; readonly historyId: string; readonly seq: number };
 
 export type HubStore = {
@@ -41,9 +45,17 @@ export type HubWrite = {
   /** Locks the club row: the only lock. */
   lockClub(): Promise<HubClub>;
   records(keys: readonly HubKey[]): Promise<(HubRecord | undefined)[]>;
-  /** Those of the keys that anything of this club refers to. */
+  /** Those of the keys that anything of this club refers to, deleted records included: they can be restored. */
   referredTo(keys: readonly HubKey[]): Promise<HubKey[]>;
-  /** Writes records and history rows, and leaves the club at `seq`. */
+  /**
+   * Those of the values that the history already holds as `replaced` (same record, field and stamp), so that
+   * a change that comes twice makes no second row. Called only where a change meets a later value.
+   */
+  replacedBefore(values: readonly ReplacedKey[]): Promise<ReplacedKey[]>;
+  /**
+   * Writes records and history rows, and leaves the club at `seq`. Called at most once, last, and only where
+   * something changed. The `seq` of records and of rows that travel are old + 1 … `seq`, each used once.
+   */
   save(records: readonly HubRecord[], history: readonly HistoryRow[], seq: number): Promise<void>;
 };
 

@@ -1,4 +1,4 @@
-import type { Stamp } from '../stamp/stamp.js';
+import { parseStamp, type Stamp } from '../stamp/stamp.js';
 import { sameValue } from './canonical-json.js';
 import { isLater } from './merge-record.js';
 import { stampOf, type FieldValue, type RecordState } from './record-state.js';
@@ -32,8 +32,13 @@ export function replacedValues(
     const incoming = { value: change.fields[field], stamp: stampOf(change, field) };
     if (incoming.stamp === current.stamp && sameValue(incoming.value, current.value)) return [];
     const wins = isLater(incoming, current);
-    const clash = base?.[field] !== current.stamp;
+    const clash = base?.[field] !== current.stamp && !isOwnEarlierValue(current.stamp, incoming.stamp);
     if (!wins && sameValue(incoming.value, current.value)) return [];
     return [{ field, replaced: wins ? current : incoming, kept: wins ? incoming : current, clash }];
   });
+}
+
+/** A device has always seen its own values, even where the answer that told of their arrival was lost. */
+function isOwnEarlierValue(current: Stamp, incoming: Stamp): boolean {
+  return current < incoming && parseStamp(current).deviceId === parseStamp(incoming).deviceId;
 }

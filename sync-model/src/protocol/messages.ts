@@ -8,7 +8,10 @@ import type { Stamp } from '../stamp/stamp.js';
  * `message-schemas.ts` says the same in zod for the server's border; a test holds one against the other.
  */
 
-/** Absent fields are unchanged in a change with `base`; a new record has no `base` and absent fields are empty. */
+/**
+ * Absent fields are unchanged in a change with `base`; a new record has no `base` and absent fields are empty,
+ * with the stamp that `stamps` gives them. A value that was lost on the phone is sent with its own, earlier stamp.
+ */
 export type Change = {
   type: WritableType;
   id: string;
@@ -34,7 +37,7 @@ export type ChangeResult =
   | { type: WritableType; id: string; status: 'held'; needs: string }
   | { type: WritableType; id: string; status: 'refused'; code: RefusalCode; message: string };
 
-/** A record of the club's feed; fields that are null are left out. */
+/** A record of the club's feed; fields that are null are left out, their stamps are not. */
 export type FeedRecord = {
   type: RecordType;
   id: string;
@@ -55,6 +58,7 @@ export type SyncClubAnswer = {
   card: ClubCard;
   historyId: string;
   headSeq: number;
+  /** One for each change of the request, in its order. */
   results: ChangeResult[];
   records: FeedRecord[];
   cursor: number;
