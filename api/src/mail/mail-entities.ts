@@ -1,0 +1,3 @@
+import { OutgoingMail } from './outgoing-mail.entity.js';
+
+export const MAIL_ENTITIES = [OutgoingMail];
