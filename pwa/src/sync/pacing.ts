@@ -1,9 +1,8 @@
+import type { PauseReason } from '../platform/sending';
+
 /** When the next round is due. Network and visibility only ask for a round; the pacing decides. */
 export type RoundEnd =
   { kind: 'done'; more: boolean } | { kind: 'paused'; reason: PauseReason; retryAfterMs?: number };
-
-export type PauseReason =
-  'unreachable' | 'signed-out' | 'throttled' | 'server-error' | 'busy' | 'protocol-too-old' | 'failed';
 
 const AFTER_WRITE_MS = 1500;
 const IDLE_MS = 60_000;

@@ -1,25 +1,22 @@
-import { createContext, use, useEffect, useMemo, useRef, useState, type ReactNode } from 'react';
+import { useEffect, useMemo, useRef, useState, type ReactNode } from 'react';
+import { IDLE_SENDING, SendingContext, type SendingStatus } from '../platform/sending';
 import { useActiveLogActions, useActiveLogState } from '../store/active-log';
-import { IDLE_STATUS, startSyncRunner, type SyncRunner, type SyncStatus } from './sync-runner';
-
-type SyncHandle = { status: SyncStatus; sendNow(): void };
-
-const SyncContext = createContext<SyncHandle>({ status: IDLE_STATUS, sendNow: () => undefined });
+import { startSyncRunner, type SyncRunner } from './sync-runner';
 
 /** Sends the open account's log for as long as the app is open; a guest's log stays where it is. */
 export function SyncProvider({ children }: { children: ReactNode }) {
   const state = useActiveLogState();
   const { refresh } = useActiveLogActions();
   const log = state.kind === 'open' ? state.log : null;
-  const [status, setStatus] = useState<SyncStatus>(IDLE_STATUS);
+  const [status, setStatus] = useState<SendingStatus>(IDLE_SENDING);
   const runner = useRef<SyncRunner | null>(null);
   const database = log?.database;
 
   useEffect(() => {
     if (!log?.account) return;
     const channel = new BroadcastChannel(`harkmoor-sync-${log.database.name}`);
-    channel.onmessage = (event: MessageEvent<SyncStatus>) => setStatus(event.data);
-    const tell = (next: SyncStatus) => {
+    channel.onmessage = (event: MessageEvent<SendingStatus>) => setStatus(event.data);
+    const tell = (next: SendingStatus) => {
       setStatus(next);
       if (next.pause !== 'busy') channel.postMessage(next);
     };
@@ -28,16 +25,12 @@ export function SyncProvider({ children }: { children: ReactNode }) {
       runner.current?.stop();
       runner.current = null;
       channel.close();
-      setStatus(IDLE_STATUS);
+      setStatus(IDLE_SENDING);
     };
     // a new log object over the same database (another club shown) must not restart the sending
     // eslint-disable-next-line react-hooks/exhaustive-deps
   }, [database]);
 
   const handle = useMemo(() => ({ status, sendNow: () => runner.current?.request() }), [status]);
-  return <SyncContext value={handle}>{children}</SyncContext>;
-}
-
-export function useSync(): SyncHandle {
-  return use(SyncContext);
+  return <SendingContext value={handle}>{children}</SendingContext>;
 }

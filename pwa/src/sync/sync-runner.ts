@@ -2,24 +2,10 @@ import type { DevicePorts } from '@harkmoor/sync-model/device/ports';
 import { createSyncEngine } from '@harkmoor/sync-model/device/sync-engine';
 import { createDexieStore } from '../store/dexie-store';
 import type { OpenLog } from '../store/open-log';
+import { IDLE_SENDING, type SendingStatus } from '../platform/sending';
 import { createHttpLink } from './http-link';
-import { afterWriteDelayMs, nextRoundDelayMs, type PauseReason, type RoundEnd } from './pacing';
+import { afterWriteDelayMs, nextRoundDelayMs, type RoundEnd } from './pacing';
 import { createTabLock } from './tab-lock';
-
-/** What the screens are told of the sending: kept by the tab that syncs, told to the others. */
-export type SyncStatus = {
-  readonly isRunning: boolean;
-  readonly inFlight: ReadonlySet<string>;
-  readonly lastContactAt: number | null;
-  readonly pause: PauseReason | null;
-};
-
-export const IDLE_STATUS: SyncStatus = {
-  isRunning: false,
-  inFlight: new Set(),
-  lastContactAt: null,
-  pause: null,
-};
 
 export type SyncRunner = {
   /** Asks for a round now; safe to call at any time. */
@@ -30,18 +16,18 @@ export type SyncRunner = {
 /** Runs rounds for an account's log until stopped. A guest's log has nobody to send to and gets no runner. */
 export function startSyncRunner(
   log: OpenLog,
-  onStatus: (status: SyncStatus) => void,
+  onStatus: (status: SendingStatus) => void,
   onRoundDone: () => void,
 ): SyncRunner {
   const accountId = log.account?.id;
   if (!accountId) throw new Error('a guest’s log is not sent');
   const engine = createSyncEngine(portsOf(log, accountId), { deviceId: log.deviceId, accountId });
-  let status = IDLE_STATUS;
+  let status = IDLE_SENDING;
   let timer: ReturnType<typeof setTimeout> | undefined;
   let isStopped = false;
   let failures = 0;
 
-  const tell = (change: Partial<SyncStatus>) => {
+  const tell = (change: Partial<SendingStatus>) => {
     status = { ...status, ...change };
     if (!isStopped) onStatus(status);
   };
