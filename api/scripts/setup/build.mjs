@@ -16,7 +16,7 @@ export const VITE = 'node_modules/vite/bin/vite.js';
 
 /**
  * Builds model, API and app when their inputs changed since the last build or an output is missing.
- * `run` starts a command and resolves at its end, or rejects.
+ * `run(command, name, env)` starts a command and resolves at its end, or rejects.
  */
 export async function buildAll(root, run) {
   const stampPath = path.join(root, STAMP);
@@ -26,7 +26,9 @@ export async function buildAll(root, run) {
   console.log('Building …');
   fs.rmSync(stampPath, { force: true });
   await buildServer(run);
-  await run([process.execPath, VITE, 'build', '--logLevel', 'warn', 'pwa'], 'the build of the app');
+  // said here, because a NODE_ENV of the caller would otherwise bring React's slow build for development
+  const env = { NODE_ENV: 'production' };
+  await run([process.execPath, VITE, 'build', '--logLevel', 'warn', 'pwa'], 'the build of the app', env);
   fs.writeFileSync(stampPath, wanted);
 }
 

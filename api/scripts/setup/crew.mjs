@@ -27,6 +27,10 @@ export class Crew {
     if (code !== 0) throw new PlainFailure(`${name} failed (${code}); the lines above say why.`);
   }
 
+  get isStopping() {
+    return this.#stopping !== null;
+  }
+
   /** Ends all, then this process. A second call changes nothing. */
   stop(exitCode) {
     this.#stopping ??= this.#endAll().then(() => process.exit(exitCode));
@@ -51,7 +55,7 @@ export async function withCrew(work) {
   try {
     await crew.stop(await work(crew));
   } catch (error) {
-    printFailure(error);
+    if (!crew.isStopping) printFailure(error); // while all is ending, a part that ends is no failure
     await crew.stop(1);
   }
 }

@@ -1,10 +1,8 @@
 import fs from 'node:fs';
 import path from 'node:path';
-import { PlainFailure } from './plain-failure.mjs';
-import { startCommand } from './processes.mjs';
 
 /** Runs `npm ci` when what is installed is not what package-lock.json says. `run` starts a command and resolves at its end. */
-export async function installPackages(root, run = runTethered) {
+export async function installPackages(root, run) {
   if (isInstalled(root)) return;
   console.log('Installing packages (npm ci) …');
   const npmCli = process.env.npm_execpath?.endsWith('npm-cli.js')
@@ -24,9 +22,4 @@ export function isInstalled(root) {
     if (!place.includes('node_modules/') || entry.optional || entry.devOptional) return true;
     return installed[place]?.version === entry.version && installed[place]?.link === entry.link;
   });
-}
-
-async function runTethered([command, ...args], name) {
-  const code = await startCommand(command, args).done;
-  if (code !== 0) throw new PlainFailure(`${name} failed (${code}); its own lines above say why.`);
 }

@@ -11,11 +11,16 @@ const TETHER = path.join(import.meta.dirname, 'tether.mjs');
  * It has a session of its own, so Ctrl-C in a terminal reaches only the script that was called, which ends the rest in order.
  * `child.done` resolves to the exit code (1 after a signal), and never rejects.
  */
-export function startScript(file, args = [], { env = {}, output = 'inherit', nodeOptions = [] } = {}) {
+export function startScript(
+  file,
+  args = [],
+  { env = {}, folder, output = 'inherit', nodeOptions = [] } = {},
+) {
   const stdio = ['ignore', output, output === 'pipe' ? 'inherit' : output, 'ipc'];
   const child = spawn(process.execPath, [...nodeOptions, file, ...args], {
     stdio,
     detached: true,
+    cwd: folder,
     env: { ...process.env, ...env },
   });
   child.done = new Promise((resolve) => {
