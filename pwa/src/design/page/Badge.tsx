@@ -22,7 +22,7 @@ function PersonMark() {
   return (
     <svg width="18" height="18" viewBox="0 0 18 18" fill="none" stroke="currentColor" strokeWidth="2">
       <circle cx="9" cy="6" r="3" />
-      <path d="M3 16c.6-3.4 3-5 6-5s5.400 1.600 6 5" strokeLinecap="round" />
+      <path d="M3 16c.6-3.4 3-5 6-5s5.4 1.6 6 5" strokeLinecap="round" />
     </svg>
   );
 }
