@@ -1,0 +1,149 @@
+import { describe, expect, it } from 'vitest';
+import { observationsOf } from './observations.js';
+import { anInput, aReception, EVENING, HOUR_MS, MINUTE_MS, scored } from './testing/invented-evidence.js';
+
+const idsOf = (rows: readonly { receptionId: string }[]) => rows.map(({ receptionId }) => receptionId);
+
+describe('observationsOf', () => {
+  it('should take the first try of the hour, whoever made it', () => {
+    const { channels, targets } = observationsOf(
+      anInput([
+        aReception('r2', { deviceAt: EVENING + 20 * MINUTE_MS }, { ownerId: 'asta' }),
+        aReception('r1', { deviceAt: EVENING + 5 * MINUTE_MS, outcome: 'nil' }, { ownerId: 'birk' }),
+      ]),
+    );
+    expect(idsOf(channels)).toEqual(['r1']);
+    expect(idsOf(targets)).toEqual(['r1']);
+    expect(channels[0]).toMatchObject({ heard: false, ownerId: 'birk', o: null });
+  });
+
+  it('should take the smaller id of two tries at one moment', () => {
+    expect(idsOf(observationsOf(anInput([aReception('rb'), aReception('ra')])).channels)).toEqual(['ra']);
+  });
+
+  it('should part hours, dates, sites and antennas, but not receivers with one antenna', () => {
+    const { channels } = observationsOf(
+      anInput([
+        aReception('r1'),
+        aReception('r2', { deviceAt: EVENING + HOUR_MS }),
+        aReception('r3', { deviceAt: EVENING + 24 * HOUR_MS }),
+        aReception('r4', { siteId: 'heath' }),
+        aReception('r5', { setupId: 'bench-whip' }),
+        aReception('r6', { setupId: 'lab-wire' }),
+      ]),
+    );
+    expect(idsOf(channels).sort()).toEqual(['r1', 'r2', 'r3', 'r4', 'r5']);
+  });
+
+  it('should place a try in the hour of its corrected time', () => {
+    const check = {
+      deleted: false,
+      importId: null,
+      deviceId: 'pebble01',
+      deviceAt: EVENING,
+      offsetMs: -MINUTE_MS,
+      uncertaintyMs: 100,
+      method: 'tone' as const,
+      pathKm: null,
+    };
+    const midnight = Date.UTC(2026, 11, 1);
+    const tries = [aReception('r1', { deviceAt: midnight + 30_000 })];
+    const { channels } = observationsOf(anInput(tries, { clockChecks: [{ ...check, deviceAt: midnight }] }));
+    expect(channels[0]).toMatchObject({ hourUtc: 23, monthKey: '2026-11', timeBasis: 'nearest' });
+    expect(observationsOf(anInput(tries)).channels[0]).toMatchObject({ hourUtc: 0, monthKey: '2026-12' });
+  });
+
+  it('should count two targets on one frequency as one observation of the channel', () => {
+    const { channels, targets } = observationsOf(
+      anInput([
+        aReception('r1', { targetId: 'plover', outcome: 'nil' }),
+        aReception('r2', { targetId: 'tern', deviceAt: EVENING + MINUTE_MS }),
+      ]),
+    );
+    expect(idsOf(channels)).toEqual(['r1']);
+    expect(idsOf(targets)).toEqual(['r1', 'r2']);
+  });
+
+  it('should let an unsure identity stand for the frequency and a later sure one for the target', () => {
+    const { channels, targets } = observationsOf(
+      anInput([
+        aReception('r1', { identity: 'tentative' }),
+        aReception('r2', { deviceAt: EVENING + 9 * MINUTE_MS }),
+      ]),
+    );
+    expect(idsOf(channels)).toEqual(['r1']);
+    expect(idsOf(targets)).toEqual(['r2']);
+  });
+
+  it('should name the channel by the frequency of the target as it was at the entry', () => {
+    const moved = aReception('r1', { targetHz: 6_075_000, tuning: { dialHz: 6_070_400, mode: 'AM' } });
+    const free = aReception('r2', {
+      targetId: null,
+      targetHz: null,
+      tuning: { dialHz: 6_071_900, mode: 'AM' },
+    });
+    const { channels } = observationsOf(anInput([moved, free]));
+    expect(channels.map(({ channelKey, bandKey }) => [channelKey, bandKey])).toEqual([
+      ['6075000', '49 m broadcast'],
+      ['6070000', '49 m broadcast'],
+    ]);
+  });
+
+  it('should take the error of the dial off before it looks for the raster', () => {
+    // 500 ppm high at 6 070 kHz is 3 kHz: the dial shows 6 073, nearer to 6 075.
+    const off = aReception('r1', {
+      targetId: null,
+      targetHz: null,
+      tuning: { dialHz: 6_073_035, mode: 'AM' },
+    });
+    const dialCheck = {
+      deleted: false,
+      importId: null,
+      receiverId: 'bench',
+      at: EVENING,
+      referenceHz: 5_000_000,
+      dialHz: 5_002_500,
+      errorPpm: 500,
+      uncertaintyPpm: 5,
+      method: 'zero-beat' as const,
+      temperatureC: null,
+    };
+    expect(observationsOf(anInput([off])).channels[0]?.channelKey).toBe('6075000');
+    expect(observationsOf(anInput([off], { dialChecks: [dialCheck] })).channels[0]?.channelKey).toBe(
+      '6070000',
+    );
+  });
+
+  it('should count amateur signals by the band', () => {
+    const met = { targetId: null, targetHz: null, basis: 'planned' as const };
+    const { channels } = observationsOf(
+      anInput([
+        aReception('r1', { ...met, tuning: { dialHz: 7_032_000, mode: 'CW' } }),
+        aReception('r2', { ...met, tuning: { dialHz: 7_090_000, mode: 'LSB' } }),
+      ]),
+    );
+    expect(channels).toHaveLength(1);
+    expect(channels[0]).toMatchObject({ channelKey: '40 m', bandKey: '40 m amateur', isWholeBand: true });
+  });
+
+  it('should take the attenuator and the preamplifier off the level', () => {
+    const { channels } = observationsOf(
+      anInput([aReception('r1', { setupId: 'hot', meter: { s: 9, overDb: 10 }, attenuationDb: 20 })], {
+        setups: new Map([
+          ['hot', { receiverId: 'bench', antennaId: 'wire', attenuationDb: 6, preampDb: 12 }],
+        ]),
+      }),
+    );
+    expect(channels[0]?.levelDbm).toBe(-73 + 10 + 20 - 12);
+  });
+
+  it('should count no score or reading that was only carried over from the entry before', () => {
+    const carried = {
+      sinpo: scored(5),
+      meter: { s: 7, overDb: 0 },
+      carried: ['sinpo' as const, 'meter' as const],
+    };
+    const { channels } = observationsOf(anInput([aReception('r1', carried)]));
+    expect(channels[0]).toMatchObject({ heard: true, o: null, levelDbm: null });
+  });
+});
