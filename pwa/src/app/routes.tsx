@@ -1,5 +1,6 @@
 import { Navigate, Route } from 'react-router-dom';
 import { paths } from '../platform/paths';
+import { LogGate } from './LogGate';
 import { PageBoundary } from './PageBoundary';
 import { ROUTED_PAGES } from './pages';
 import { UnknownPage } from './UnknownPage';
@@ -12,7 +13,9 @@ export const ROUTES = [
       path={pattern}
       element={
         <PageBoundary>
-          <Page />
+          <LogGate page={name}>
+            <Page />
+          </LogGate>
         </PageBoundary>
       }
     />

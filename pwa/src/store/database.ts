@@ -38,7 +38,10 @@ export class HarkmoorDatabase extends Dexie {
     super(name, { chromeTransactionDurability: 'strict' });
     this.version(1).stores({
       ...Object.fromEntries(
-        WRITABLE_TYPES.map((type) => [type, [KEY, OWED, ...(EXTRA_INDEXES[type] ?? [])].join()]),
+        WRITABLE_TYPES.map((type) => [
+          type,
+          [KEY, OWED, 'debt.status', ...(EXTRA_INDEXES[type] ?? [])].join(),
+        ]),
       ),
       ...Object.fromEntries(SERVER_TYPES.map((type) => [type, [KEY, ...(EXTRA_INDEXES[type] ?? [])].join()])),
       clubs: 'clubId',

@@ -103,10 +103,15 @@ async function openFrom(database: HarkmoorDatabase, account: KnownAccount | null
     deviceNowMs: () => Date.now(),
     clockOffsetMs: await watchClockOffset(database),
   });
+  let last: { log: OpenLog; view: string } | undefined;
   const read = async (): Promise<OpenLog> => {
     const view = await readView(database);
+    const told = JSON.stringify(view);
+    // the same object while nothing has changed, so that screens are not drawn again after each round
+    if (last?.view === told) return last.log;
     shown.clubId = view.clubId;
-    return { ...view, database, deviceId, writer, reload: read };
+    last = { view: told, log: { ...view, database, deviceId, writer, reload: read } };
+    return last.log;
   };
   return read();
 }

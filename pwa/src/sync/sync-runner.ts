@@ -51,7 +51,7 @@ export function startSyncRunner(
       pause: end.kind === 'paused' ? end.reason : null,
       lastContactAt: wasReached ? Date.now() : status.lastContactAt,
     });
-    if (wasReached) onRoundDone();
+    if (wasReached && !isStopped) onRoundDone();
     wait(nextRoundDelayMs(end, failures, Math.random()));
   }
 

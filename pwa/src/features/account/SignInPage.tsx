@@ -1,12 +1,69 @@
-import { EmptyState } from '../../design/states/EmptyState';
+import { useIonRouter } from '@ionic/react';
+import { useState } from 'react';
+import { Link } from 'react-router-dom';
+import { TextField } from '../../design/form/TextField';
 import { PageFrame } from '../../design/page/PageFrame';
 import { paths } from '../../platform/paths';
+import { addressFaults } from './account-faults';
+import { signIn } from './data/session';
+import { useAccount, useGuestReceptions } from './data/use-account';
+import { FormFrame } from './FormFrame';
+import { useRequest } from './use-request';
 
-/** Sign in. */
+/** Signs in on this phone. What was logged here without an account goes into the person's My log. */
 export function SignInPage() {
+  const view = useAccount();
+  const router = useIonRouter();
+  const request = useRequest();
+  const guestReceptions = useGuestReceptions();
+  const [email, setEmail] = useState('');
+  const [password, setPassword] = useState('');
+
+  async function submit(): Promise<void> {
+    if (view.kind === 'opening' || view.kind === 'failed') return;
+    const missing = password === '' ? [{ field: 'password', message: 'Write your password' }] : [];
+    const done = await request.ask([...addressFaults(email), ...missing], () =>
+      signIn({ email: email.trim(), password }, view.actions),
+    );
+    if (done) router.push(paths.field(), 'root', 'replace');
+  }
+
   return (
     <PageFrame title="Sign in" back={{ to: paths.account(), label: 'Account' }}>
-      <EmptyState title="Not here yet" sentence="This screen is being built. Nothing can be entered on it." />
+      {guestReceptions > 0 ? (
+        <p>
+          {guestReceptions === 1 ? 'One reception was' : `${guestReceptions} receptions were`} logged on this
+          phone without an account. Signing in takes the log into your My log, where nobody else sees it.
+        </p>
+      ) : null}
+      <FormFrame request={request} submitLabel="Sign in" onSubmit={submit}>
+        <TextField
+          {...request.errors.field('email')}
+          label="Mail address"
+          type="email"
+          autoComplete="username"
+          inputMode="email"
+          autoCapitalize="none"
+          required
+          value={email}
+          onChange={setEmail}
+        />
+        <TextField
+          {...request.errors.field('password')}
+          label="Password"
+          type="password"
+          autoComplete="current-password"
+          required
+          value={password}
+          onChange={setPassword}
+        />
+      </FormFrame>
+      <p>
+        <Link to={paths.resetPassword()}>Forgot the password</Link>
+      </p>
+      <p>
+        <Link to={paths.signUp()}>Make an account</Link>
+      </p>
     </PageFrame>
   );
 }

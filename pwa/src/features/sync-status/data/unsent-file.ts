@@ -2,7 +2,7 @@ import type { StoredRecord } from '@harkmoor/sync-model/device/stored-record';
 import { isWritableType, WRITABLE_TYPES } from '@harkmoor/sync-model/records/record-types';
 import { isStamp } from '@harkmoor/sync-model/stamp/stamp';
 import type { OpenLog } from '../../../store/open-log';
-import { readOwed } from './use-owed';
+import { readOwed } from '../../../store/owed';
 
 /** What an unsent-records file says of itself; read again by this application alone. */
 const FORMAT = 'harkmoor-unsent';
