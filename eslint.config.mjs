@@ -1,11 +1,59 @@
 import js from '@eslint/js';
+import reactHooks from 'eslint-plugin-react-hooks';
 import tseslint from 'typescript-eslint';
 
-const nodeGlobals = Object.fromEntries(
-  ['process', 'console', 'setTimeout', 'clearTimeout', 'setInterval', 'clearInterval', 'URL', 'fetch', 'Buffer', 'performance', 'crypto', 'document', 'window', 'navigator', 'indexedDB', 'getComputedStyle', 'localStorage', 'location', 'caches', 'requestAnimationFrame', 'AbortSignal', 'TextEncoder', 'TextDecoder', 'CompressionStream', 'Response', 'Blob'].map(
-    (name) => [name, 'readonly'],
-  ),
-);
+// scripts run in Node, and the functions that journeys hand to a page run in the browser
+const GLOBALS = [
+  ...[
+    'process',
+    'console',
+    'Buffer',
+    'performance',
+    'crypto',
+    'fetch',
+    'Response',
+    'Blob',
+    'URL',
+    'URLSearchParams',
+  ],
+  ...[
+    'setTimeout',
+    'clearTimeout',
+    'setInterval',
+    'clearInterval',
+    'AbortSignal',
+    'AbortController',
+    'structuredClone',
+  ],
+  ...[
+    'TextEncoder',
+    'TextDecoder',
+    'CompressionStream',
+    'DecompressionStream',
+    'globalThis',
+    'indexedDB',
+    'IDBKeyRange',
+  ],
+  ...[
+    'document',
+    'window',
+    'navigator',
+    'location',
+    'localStorage',
+    'sessionStorage',
+    'caches',
+    'getComputedStyle',
+  ],
+  ...[
+    'requestAnimationFrame',
+    'PerformanceObserver',
+    'MutationObserver',
+    'Event',
+    'KeyboardEvent',
+    'PointerEvent',
+  ],
+  ...['HTMLElement', 'Node', 'NodeFilter', 'createImageBitmap', 'OffscreenCanvas'],
+];
 
 export default tseslint.config(
   { ignores: ['**/dist/', '**/node_modules/', '.data/', '.screens/', '.bench/'] },
@@ -13,7 +61,12 @@ export default tseslint.config(
   tseslint.configs.recommended,
   {
     files: ['**/*.ts', '**/*.tsx'],
-    languageOptions: { parserOptions: { projectService: true, tsconfigRootDir: import.meta.dirname } },
+    languageOptions: {
+      parserOptions: {
+        projectService: { allowDefaultProject: ['sync-model/vitest.config.ts'] },
+        tsconfigRootDir: import.meta.dirname,
+      },
+    },
     rules: {
       '@typescript-eslint/no-floating-promises': 'error',
       '@typescript-eslint/no-misused-promises': ['error', { checksVoidReturn: { attributes: false } }],
@@ -21,6 +74,26 @@ export default tseslint.config(
       'no-console': ['error', { allow: ['error'] }],
     },
   },
-  { files: ['**/*.mjs'], languageOptions: { globals: nodeGlobals } },
-  { rules: { '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }] } },
+  {
+    files: ['pwa/src/**/*.{ts,tsx}'],
+    plugins: { 'react-hooks': reactHooks },
+    rules: {
+      'react-hooks/rules-of-hooks': 'error',
+      'react-hooks/exhaustive-deps': 'error',
+      'react-hooks/static-components': 'error',
+      'react-hooks/set-state-in-render': 'error',
+      'react-hooks/use-memo': 'error',
+      'react-hooks/error-boundaries': 'error',
+      'react-hooks/globals': 'error',
+    },
+  },
+  {
+    files: ['**/*.mjs'],
+    languageOptions: { globals: Object.fromEntries(GLOBALS.map((name) => [name, 'readonly'])) },
+  },
+  {
+    rules: {
+      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }],
+    },
+  },
 );
