@@ -75,6 +75,11 @@ export default tseslint.config(
     },
   },
   {
+    files: ['*/src/**/*.{ts,tsx}'],
+    ignores: ['**/*.test.{ts,tsx}'],
+    rules: { 'max-lines-per-function': ['error', { max: 70, skipBlankLines: true, skipComments: true }] },
+  },
+  {
     files: ['pwa/src/**/*.{ts,tsx}'],
     plugins: { 'react-hooks': reactHooks },
     rules: {
