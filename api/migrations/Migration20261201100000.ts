@@ -26,7 +26,7 @@ const ACCOUNT_TABLES = [
     current_hash text,
     pending_hash text not null,
     ended_at bigint,
-    end_reason text check (end_reason in ('signed-out', 'reuse', 'reset')),
+    end_reason text check (end_reason in ('signed-out', 'signed-in-again', 'reuse', 'reset')),
     check ((ended_at is null) = (end_reason is null))
   )`,
   'create index device_session_account on device_session (account_id)',
@@ -47,7 +47,8 @@ const ACCOUNT_TABLES = [
   'create index mail_token_account on mail_token (account_id)',
   `create table attempt_count (
     key_hash text primary key,
-    tries integer not null check (tries > 0),
+    tries integer not null check (tries >= 0),
+    first_at bigint not null,
     last_at bigint not null
   )`,
   'create index attempt_count_last on attempt_count (last_at)',

@@ -6,13 +6,21 @@ import { ACCOUNT_ENTITIES } from './accounts/account-entities.js';
 import { CLUB_ENTITIES } from './clubs/club-entities.js';
 import { LOGBOOK_ENTITIES } from './logbook/record-rows.js';
 import { MAIL_ENTITIES } from './mail/mail-entities.js';
+import { PLATFORM_ENTITIES } from './platform/platform-entities.js';
 import { HistoryRow } from './sync/history.row.js';
 
 /** Entities and migrations are named one by one: the same list holds in dist and in tests, with no look through folders. */
 export function databaseOptions(databaseUrl: string, connectionsMax = 10) {
   return defineConfig({
     clientUrl: databaseUrl,
-    entities: [...ACCOUNT_ENTITIES, ...CLUB_ENTITIES, ...MAIL_ENTITIES, ...LOGBOOK_ENTITIES, HistoryRow],
+    entities: [
+      ...PLATFORM_ENTITIES,
+      ...ACCOUNT_ENTITIES,
+      ...CLUB_ENTITIES,
+      ...MAIL_ENTITIES,
+      ...LOGBOOK_ENTITIES,
+      HistoryRow,
+    ],
     extensions: [Migrator],
     pool: { min: 0, max: connectionsMax },
     // values of rows must not get into error messages, and so into the log

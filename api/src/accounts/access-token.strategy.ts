@@ -2,11 +2,12 @@ import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
 import { PassportStrategy } from '@nestjs/passport';
 import { ExtractJwt, Strategy } from 'passport-jwt';
+import type { SignedInAs } from '../platform/access/signed-in.js';
 import { Clock } from '../platform/clock/clock.js';
 import { Secrets } from '../platform/secrets/secrets.js';
 import { ACCESS_ALGORITHM, ACCESS_AUDIENCE, ACCESS_ISSUER, verifiedTokenSchema } from './access-token.js';
+import { Account } from './account.entity.js';
 import { DeviceSession } from './device-session.entity.js';
-import type { SignedInAs } from './signed-in.js';
 
 /**
  * Accepts an access token that this server signed, that is in time, and whose session is still open: the end of
@@ -38,6 +39,8 @@ export class AccessTokenStrategy extends PassportStrategy(Strategy) {
     const { sub, sid, exp } = token.data.payload;
     if (this.clock.nowMs() >= exp * 1000) return null;
     const session = await this.em.findOne(DeviceSession, { id: sid, accountId: sub, endedAt: null });
-    return session ? { accountId: sub, sessionId: sid } : null;
+    if (!session) return null;
+    const { name, isConfirmed } = await this.em.findOneOrFail(Account, { id: sub });
+    return { accountId: sub, sessionId: sid, name, isConfirmed };
   }
 }

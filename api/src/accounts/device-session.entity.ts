@@ -1,7 +1,7 @@
 import { Entity, PrimaryKey, Property } from '@mikro-orm/core';
 import { WholeNumberType } from '../platform/database/whole-number-type.js';
 
-export type SessionEnd = 'signed-out' | 'reuse' | 'reset';
+export type SessionEnd = 'signed-out' | 'signed-in-again' | 'reuse' | 'reset';
 
 /** How long a device may stay away and still come back without a password. */
 export const SESSION_IDLE_MS_MAX = 400 * 24 * 3_600_000;

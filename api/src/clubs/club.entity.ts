@@ -75,12 +75,14 @@ export class Club {
     return this.seq;
   }
 
-  /** A new code replaces the one before. */
-  openToCode(codeHash: string, nowMs: number): void {
+  /** A new code replaces the one before; returns until when it opens the club. */
+  openToCode(codeHash: string, nowMs: number): number {
     if (this.kind === 'my-log') throw new Error('My log is never shared');
+    const expiresAt = nowMs + JOIN_CODE_LIFE_MS;
     this.joinCodeHash = codeHash;
-    this.joinCodeExpiresAt = nowMs + JOIN_CODE_LIFE_MS;
+    this.joinCodeExpiresAt = expiresAt;
     this.joinCodeUsesLeft = JOIN_CODE_USES_MAX;
+    return expiresAt;
   }
 
   isOpenTo(codeHash: string, nowMs: number): boolean {

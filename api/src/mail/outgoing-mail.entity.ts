@@ -3,6 +3,9 @@ import { WholeNumberType } from '../platform/database/whole-number-type.js';
 
 export type MailKind = 'confirm' | 'reset' | 'sign-up-known';
 
+const PAUSE_MS_FIRST = 10_000;
+const PAUSE_MS_MAX = 3_600_000;
+
 /** A mail that waits to be sent; the row goes when the mail has gone. It holds no token, only the id that makes it. */
 @Entity({ tableName: 'outgoing_mail' })
 export class OutgoingMail {
@@ -41,5 +44,11 @@ export class OutgoingMail {
     this.toName = made.toName;
     this.mailTokenId = made.mailTokenId;
     this.nextTryAt = made.nowMs;
+  }
+
+  /** Each failure doubles the pause, from 10 s to an hour. */
+  failed(nowMs: number): void {
+    this.tries += 1;
+    this.nextTryAt = nowMs + Math.min(PAUSE_MS_MAX, PAUSE_MS_FIRST * 2 ** Math.min(this.tries - 1, 20));
   }
 }

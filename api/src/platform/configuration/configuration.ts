@@ -20,6 +20,10 @@ const environmentSchema = z.object({
   TRUSTED_PROXIES: wholeNumber(0, 10).default(0),
   REQUESTS_PER_MINUTE: wholeNumber(1, 10_000_000).default(1200),
   DATABASE_CONNECTIONS: wholeNumber(2, 500).default(10),
+  /** Free tries of a password, an account and network together; then each waits twice as long. */
+  SIGN_IN_TRIES: wholeNumber(1, 1_000_000).default(5),
+  MAILS_PER_ADDRESS_PER_HOUR: wholeNumber(1, 1_000_000).default(5),
+  MAILS_PER_NETWORK_PER_HOUR: wholeNumber(1, 1_000_000).default(60),
 });
 
 export type Environment = Readonly<Record<string, string | undefined>>;
@@ -39,6 +43,9 @@ export class Configuration {
   readonly logLevel: string;
   readonly trustedProxies: number;
   readonly requestsPerMinute: number;
+  readonly signInTries: number;
+  readonly mailsPerAddressPerHour: number;
+  readonly mailsPerNetworkPerHour: number;
 
   constructor(environment: z.infer<typeof environmentSchema>) {
     this.port = environment.PORT;
@@ -53,6 +60,9 @@ export class Configuration {
     this.logLevel = environment.LOG_LEVEL;
     this.trustedProxies = environment.TRUSTED_PROXIES;
     this.requestsPerMinute = environment.REQUESTS_PER_MINUTE;
+    this.signInTries = environment.SIGN_IN_TRIES;
+    this.mailsPerAddressPerHour = environment.MAILS_PER_ADDRESS_PER_HOUR;
+    this.mailsPerNetworkPerHour = environment.MAILS_PER_NETWORK_PER_HOUR;
   }
 
   get isHttps(): boolean {

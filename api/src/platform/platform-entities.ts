@@ -1,0 +1,3 @@
+import { AttemptCount } from './attempts/attempt-count.entity.js';
+
+export const PLATFORM_ENTITIES = [AttemptCount];
