@@ -3,7 +3,7 @@ import { fromRegisters, stampOf } from '../merge/record-state.js';
 import type { FieldsByType } from '../records/schemas.js';
 import type { WritableType } from '../records/record-types.js';
 import type { Stamp } from '../stamp/stamp.js';
-import type { OwedField, StoredRecord } from './stored-record.js';
+import { withState, type OwedField, type StoredRecord } from './stored-record.js';
 
 type Stamper = (replaced?: readonly (Stamp | undefined)[]) => Stamp;
 
@@ -57,26 +57,24 @@ export function editedRecord<T extends WritableType>(
   }
   const owed: Record<string, OwedField> = { ...current.debt?.fields };
   for (const field of changed) {
-    owed[field] = { base: owedBase(current, field) };
+    owed[field] = owedAfterEdit(current, field);
     registers[field] = { value: (patch as Record<string, unknown>)[field], stamp };
   }
   const edited: StoredRecord = {
-    ...current,
-    ...withoutStamps(fromRegisters(registers)),
-    debt: { since: current.debt?.since ?? deviceNowMs, fields: owed, status: 'waiting' },
+    ...withState(current, fromRegisters(registers)),
+    debt: {
+      since: current.debt?.since ?? deviceNowMs,
+      fields: owed,
+      ...(current.debt?.lost ? { lost: current.debt.lost } : {}),
+      status: 'waiting',
+    },
   };
   return edited as StoredRecord<T>;
 }
 
-/** The base stays the value that the server last told, however often the field is edited before it is sent. */
-function owedBase(record: StoredRecord, field: string): Stamp | null {
+/** The base stays the value that the writer last knew, however often the field is edited before it is sent. */
+function owedAfterEdit(record: StoredRecord, field: string): OwedField {
   const owed = record.debt?.fields[field];
-  if (owed && !owed.lost) return owed.base;
-  if (record.seq === 0) return null;
-  return field in record.fields ? stampOf(record, field) : null;
-}
-
-/** `stamps` must vanish, not linger, when a record no longer needs it. */
-function withoutStamps(state: ReturnType<typeof fromRegisters>) {
-  return { ...state, stamps: state.stamps };
+  if (owed) return owed;
+  return { base: record.seq > 0 && field in record.fields ? stampOf(record, field) : null };
 }

@@ -1,3 +1,4 @@
+import { ROUND_LIMITS, type RoundLimits } from '../protocol/limits.js';
 import type { SyncAnswer, SyncClubRequest, SyncRequest } from '../protocol/messages.js';
 import { PROTOCOL_VERSION, PROTOCOL_VERSION_OLDEST } from '../protocol/version.js';
 import { STAMP_AHEAD_MS_MAX, stampWallMs } from '../stamp/stamp.js';
@@ -14,6 +15,7 @@ export async function answerRound(
   ports: HubPorts,
   caller: { readonly accountId: string },
   request: SyncRequest,
+  limits: RoundLimits = ROUND_LIMITS,
 ): Promise<SyncAnswer> {
   const serverTime = ports.nowMs();
   const envelope = { protocol: PROTOCOL_VERSION, serverTime };
@@ -26,11 +28,11 @@ export async function answerRound(
   const pushed = new Map<string, PushedClub>();
   for (const club of request.clubs) {
     if (!club.changes?.length) continue;
-    const result = await pushClub(ports, caller.accountId, club);
+    const result = await pushClub(ports, caller.accountId, club, limits);
     if (result) pushed.set(club.clubId, result);
   }
   const pulled = await ports.store.read((snapshot) =>
-    pullClubs(snapshot, caller.accountId, request.clubs, pushed),
+    pullClubs(snapshot, caller.accountId, request.clubs, pushed, limits),
   );
   return { ...envelope, ...pulled };
 }

@@ -1,4 +1,4 @@
-import { RECORDS_PER_PAGE_MAX } from '../protocol/limits.js';
+import type { RoundLimits } from '../protocol/limits.js';
 import type { SyncClubAnswer, SyncClubRequest } from '../protocol/messages.js';
 import type { HubClub, HubSnapshot } from './ports.js';
 import type { PushedClub } from './push-club.js';
@@ -17,11 +17,12 @@ export async function pullClubs(
   accountId: string,
   requests: readonly SyncClubRequest[],
   pushed: ReadonlyMap<string, PushedClub>,
+  limits: RoundLimits,
 ): Promise<{ clubs: SyncClubAnswer[]; goneClubs: string[] }> {
   const memberships = new Map((await snapshot.memberships(accountId)).map((one) => [one.clubId, one]));
   const clubs: SyncClubAnswer[] = [];
   const goneClubs: string[] = [];
-  let budget = RECORDS_PER_PAGE_MAX;
+  let budget = limits.recordsPerPage;
   for (const request of requests) {
     const membership = memberships.get(request.clubId);
     if (!membership) {

@@ -1,4 +1,4 @@
-import { CHANGES_PER_TRANSACTION_MAX } from '../protocol/limits.js';
+import type { RoundLimits } from '../protocol/limits.js';
 import type { Change, ChangeResult, Refusal, SyncClubRequest } from '../protocol/messages.js';
 import { checkChange, isRefusal, type CheckedChange } from './check-change.js';
 import type { HubPorts } from './ports.js';
@@ -18,14 +18,15 @@ export async function pushClub(
   ports: HubPorts,
   accountId: string,
   request: SyncClubRequest,
+  { changesPerTransaction }: RoundLimits,
 ): Promise<PushedClub | null> {
   const changes = request.changes ?? [];
   const checks = changes.map(checkChange);
   const accepted = checks.filter((check): check is CheckedChange => !isRefusal(check));
   const written: WrittenChange[] = [];
   const heldByCaller = new Map<string, number>();
-  for (let start = 0; start < accepted.length; start += CHANGES_PER_TRANSACTION_MAX) {
-    const part = accepted.slice(start, start + CHANGES_PER_TRANSACTION_MAX);
+  for (let start = 0; start < accepted.length; start += changesPerTransaction) {
+    const part = accepted.slice(start, start + changesPerTransaction);
     const chunk = await writeChunk(ports, request.clubId, accountId, part);
     if (!chunk) return null;
     written.push(...chunk.changes);

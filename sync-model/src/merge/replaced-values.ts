@@ -17,6 +17,10 @@ export type ReplacedValue = {
 /** Fields whose replaced values are never kept: a place could tell an exact point that was coarsened later. */
 const NO_HISTORY_FIELDS: readonly string[] = ['place'];
 
+export function hasHistory(field: string): boolean {
+  return !NO_HISTORY_FIELDS.includes(field);
+}
+
 /**
  * The history rows that `change` makes on `stored`: one for each field where two values met, whichever won.
  * A repeat of a change makes none.
@@ -27,7 +31,7 @@ export function replacedValues(
   base: Readonly<Record<string, Stamp>> | undefined,
 ): ReplacedValue[] {
   return Object.keys(change.fields).flatMap((field) => {
-    if (!(field in stored.fields) || NO_HISTORY_FIELDS.includes(field)) return [];
+    if (!(field in stored.fields) || !hasHistory(field)) return [];
     const current = { value: stored.fields[field], stamp: stampOf(stored, field) };
     const incoming = { value: change.fields[field], stamp: stampOf(change, field) };
     if (incoming.stamp === current.stamp && sameValue(incoming.value, current.value)) return [];

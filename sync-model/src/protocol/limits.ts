@@ -11,3 +11,16 @@ export const RECORDS_PER_PAGE_MAX = 1000;
 export const CLUBS_PER_ROUND_MAX = 50;
 /** A longer value is left out of the history; its size stays. */
 export const FIELD_BYTES_HISTORY_MAX = 4096;
+
+/** The limits that decide where a round is cut; a test hands in small ones, so that cuts happen. */
+export type RoundLimits = {
+  readonly changesPerRound: number;
+  readonly changesPerTransaction: number;
+  readonly recordsPerPage: number;
+};
+
+export const ROUND_LIMITS: RoundLimits = {
+  changesPerRound: CHANGES_PER_ROUND_MAX,
+  changesPerTransaction: CHANGES_PER_TRANSACTION_MAX,
+  recordsPerPage: RECORDS_PER_PAGE_MAX,
+};

@@ -1,4 +1,4 @@
-import { nextStamp, type Stamp } from './stamp.js';
+import { nextStamp, STAMP_AHEAD_MS_MAX, stampWallMs, type Stamp } from './stamp.js';
 
 /** Where a device's stamps come from; wall time and the known offset are supplied by the host. */
 export type DeviceClock = {
@@ -8,13 +8,16 @@ export type DeviceClock = {
 };
 
 /**
- * Makes stamps that never run backwards on one device: each is later than the last one made here and than
- * the stamps of the values that the edit replaces.
+ * Makes stamps that do not run backwards on one device: each is later than the stamps of the values that the
+ * edit replaces, always, and than the last one made here, unless the clock has gone back by more than five
+ * minutes. Then it has been set right, and the old stamps, which no server would take, hold nobody back.
  */
 export function createStamper(clock: DeviceClock): (replaced?: readonly (Stamp | undefined)[]) => Stamp {
   let last: Stamp | undefined;
   return (replaced = []) => {
-    last = nextStamp(clock.deviceId, clock.nowMs(), [last, ...replaced]);
+    const nowMs = clock.nowMs();
+    if (last !== undefined && stampWallMs(last) > nowMs + STAMP_AHEAD_MS_MAX) last = undefined;
+    last = nextStamp(clock.deviceId, nowMs, [last, ...replaced]);
     return last;
   };
 }
