@@ -7,13 +7,17 @@ import './design/base.css';
 import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
 import { App } from './app/App';
+import { registerWorker } from './app/updates/worker';
 import { followTheme } from './design/theme/theme';
+import { keepInstallOffer } from './platform/install-offer';
 
 const root = document.getElementById('root');
 if (!root) throw new Error('index.html has no #root');
 followTheme();
+keepInstallOffer();
 createRoot(root).render(
   <StrictMode>
     <App />
   </StrictMode>,
 );
+registerWorker();

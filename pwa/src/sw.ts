@@ -1,13 +1,43 @@
 import { clientsClaim } from 'workbox-core';
-import { cleanupOutdatedCaches, createHandlerBoundToURL, precacheAndRoute } from 'workbox-precaching';
+import {
+  cleanupOutdatedCaches,
+  createHandlerBoundToURL,
+  getCacheKeyForURL,
+  precacheAndRoute,
+} from 'workbox-precaching';
 import { NavigationRoute, registerRoute } from 'workbox-routing';
 
-declare const self: ServiceWorkerGlobalScope & { __WB_MANIFEST: { url: string; revision: string | null }[] };
+type ManifestEntry = { url: string; revision: string | null };
+declare const self: ServiceWorkerGlobalScope & { __WB_MANIFEST: (ManifestEntry | string)[] };
 
-precacheAndRoute(self.__WB_MANIFEST);
+const MAP_CACHE = 'harkmoor-map';
+const entries = self.__WB_MANIFEST;
+
+precacheAndRoute(entries);
 cleanupOutdatedCaches();
 registerRoute(new NavigationRoute(createHandlerBoundToURL('index.html'), { denylist: [/^\/api\//] }));
+// the page puts the fine map into its cache after installation; here it is only read. Nothing else is cached, and
+// nothing under /api ever is.
+registerRoute(
+  ({ url, sameOrigin }) => sameOrigin && /\/land-10m[^/]*\.json$/.test(url.pathname),
+  async ({ request }) => (await (await caches.open(MAP_CACHE)).match(request)) ?? fetch(request),
+);
 clientsClaim(); // the first visit is controlled without a reload
+
 self.addEventListener('message', (event) => {
-  if ((event.data as { type?: string } | null)?.type === 'SKIP_WAITING') void self.skipWaiting();
+  const message = event.data as { type?: string } | null;
+  if (message?.type === 'SKIP_WAITING') void self.skipWaiting();
+  if (message?.type === 'COUNT_MISSING') event.waitUntil(answerMissing(event.ports[0]));
 });
+
+/** Answers with the number of installed files that are not in the cache, looked at one by one. */
+async function answerMissing(port: MessagePort | undefined): Promise<void> {
+  const urls = entries.map((entry) => (typeof entry === 'string' ? entry : entry.url));
+  const found = await Promise.all(
+    urls.map(async (url) => {
+      const key = getCacheKeyForURL(url);
+      return key !== undefined && (await caches.match(key)) !== undefined;
+    }),
+  );
+  port?.postMessage({ missing: found.filter((isThere) => !isThere).length, total: urls.length });
+}

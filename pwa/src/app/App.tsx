@@ -5,6 +5,7 @@ import { ROUTES } from './routes';
 import { SideRail } from './SideRail';
 import { PhoneTabs } from './PhoneTabs';
 import { RedFilter } from './RedFilter';
+import { UpdateLine } from './updates/UpdateLine';
 import './shell.css';
 
 setupIonicReact({
@@ -28,6 +29,7 @@ export function App() {
                 <IonRouterOutlet animated={false}>{ROUTES}</IonRouterOutlet>
                 {PhoneTabs()}
               </IonTabs>
+              <UpdateLine />
             </div>
           </div>
         </IonReactRouter>

@@ -22,20 +22,20 @@ export type FormErrors = {
 export function useFormErrors(): FormErrors {
   const ref = useRef<HTMLFormElement | null>(null);
   const [faults, setFaults] = useState<readonly FieldFault[]>([]);
-  const [reports, setReports] = useState(0);
-  const first = faults[0]?.field;
+  // an object a report: only a new report moves the focus, mending the first field must not jump to the second
+  const [goal, setGoal] = useState<{ readonly field: string } | null>(null);
 
   useEffect(() => {
-    if (reports === 0 || first === undefined) return;
-    const control = ref.current?.querySelector<HTMLElement>(`[name="${CSS.escape(first)}"]`);
+    if (!goal) return;
+    const control = ref.current?.querySelector<HTMLElement>(`[name="${CSS.escape(goal.field)}"]`);
     (control ?? ref.current?.querySelector<HTMLElement>('.hm-summary'))?.focus();
-    // only a new report moves the focus: mending the first field must not jump to the second
-  }, [reports]);
+  }, [goal]);
 
   const report = useCallback((next: readonly FieldFault[]): boolean => {
     setFaults(next);
-    if (next.length > 0) setReports((count) => count + 1);
-    return next.length === 0;
+    const [first] = next;
+    if (first) setGoal({ field: first.field });
+    return first === undefined;
   }, []);
   const mended = useCallback((name: string): void => {
     setFaults((before) =>

@@ -1,0 +1,68 @@
+import { useSyncExternalStore } from 'react';
+import { Workbox } from 'workbox-window';
+import { keepFineMap } from '../../platform/map-data';
+import { anyUnsavedWork, onAllSaved } from '../../platform/unsaved-work';
+import { onVisibilityChange } from '../../platform/visibility';
+
+const LOOK_AGAIN_MS = 60 * 60 * 1000;
+let waiting: Workbox | null = null;
+const listeners = new Set<() => void>();
+
+/**
+ * Registers the service worker. A new version waits until the person takes it, or until the page is hidden with no
+ * form open; it never reloads a page that holds something unsaved.
+ */
+export function registerWorker(): void {
+  if (!import.meta.env.PROD || !('serviceWorker' in navigator)) return;
+  const workbox = new Workbox('/sw.js');
+  const wasControlled = navigator.serviceWorker.controller !== null;
+  workbox.addEventListener('waiting', () => {
+    waiting = workbox;
+    tellAll();
+  });
+  navigator.serviceWorker.addEventListener('controllerchange', () => {
+    if (wasControlled || waiting) reloadWhenSaved();
+  });
+  let lookedAtMs = Date.now();
+  onVisibilityChange((visible) => {
+    if (!visible && waiting && !anyUnsavedWork()) applyUpdate();
+    if (visible && Date.now() - lookedAtMs > LOOK_AGAIN_MS) {
+      lookedAtMs = Date.now();
+      workbox.update().catch(() => undefined); // no signal: the next look comes
+    }
+  });
+  workbox
+    .register()
+    .catch((error: unknown) => console.error('The application could not be kept on this device', error));
+  void navigator.serviceWorker.ready.then(() => requestIdle(() => void keepFineMap()));
+}
+
+/** Lets the waiting version take over; the page reloads once it has. */
+export function applyUpdate(): void {
+  waiting?.messageSkipWaiting();
+}
+
+/** True while a new version waits. */
+export function useUpdateReady(): boolean {
+  return useSyncExternalStore(subscribe, () => waiting !== null);
+}
+
+/** Another tab may have taken the new version: this one follows as soon as nothing typed would be lost. */
+function reloadWhenSaved(): void {
+  if (!anyUnsavedWork()) location.reload();
+  else onAllSaved(() => location.reload());
+}
+
+function requestIdle(act: () => void): void {
+  if ('requestIdleCallback' in window) window.requestIdleCallback(act, { timeout: 10_000 });
+  else setTimeout(act, 4000);
+}
+
+function subscribe(listener: () => void): () => void {
+  listeners.add(listener);
+  return () => listeners.delete(listener);
+}
+
+function tellAll(): void {
+  for (const listener of listeners) listener();
+}
