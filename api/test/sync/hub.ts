@@ -70,11 +70,11 @@ export class TestHub {
   }
 
   async addMember(clubId: string, accountId: string, role: Role = 'member'): Promise<void> {
-    await this.rows(`update club set seq = seq + 1 where club_id = ?`, [clubId]);
     await this.rows(
-      `insert into membership (club_id, account_id, name, role, joined_at, seq, stamp)
-       select club_id, ?, 'Somebody', ?, ?, seq, ? from club where club_id = ?`,
-      [accountId, role, EVENING_MS, stampAt(EVENING_MS, SERVER_DEVICE_ID), clubId],
+      `with raised as (update club set seq = seq + 1 where club_id = ? returning club_id, seq)
+       insert into membership (club_id, account_id, name, role, joined_at, seq, stamp)
+       select club_id, ?, 'Somebody', ?, ?, seq, ? from raised`,
+      [clubId, accountId, role, EVENING_MS, stampAt(EVENING_MS, SERVER_DEVICE_ID)],
     );
   }
 
