@@ -34,7 +34,7 @@ export default defineConfig({
       injectRegister: false, // app/updates registers it with workbox-window
       injectManifest: {
         globPatterns: ['**/*.{js,css,html,woff2,json,svg,png,webmanifest}'],
-        globIgnores: ['.vite/**', '**/countries-10m*.json', '**/land-10m*.json'],
+        globIgnores: ['.vite/**', '**/countries-10m*.json', '**/land-10m*.json', '**/*.map'],
         maximumFileSizeToCacheInBytes: 4_000_000,
       },
       manifest: {
@@ -44,13 +44,18 @@ export default defineConfig({
         start_url: '/field',
         id: '/',
         display: 'standalone',
-        background_color: '#FAF7F0',
-        theme_color: '#FAF7F0',
+        // the system's splash comes before our first frame and knows no theme: black spares dark-adapted eyes
+        background_color: '#000000',
+        theme_color: '#000000',
         icons: [
           { src: '/icons/harkmoor-192.png', sizes: '192x192', type: 'image/png', purpose: 'any' },
           { src: '/icons/harkmoor-512.png', sizes: '512x512', type: 'image/png', purpose: 'any' },
-          { src: '/icons/harkmoor-maskable-512.png', sizes: '512x512', type: 'image/png', purpose: 'maskable' },
-          { src: '/icons/harkmoor.svg', sizes: 'any', type: 'image/svg+xml', purpose: 'any' },
+          {
+            src: '/icons/harkmoor-maskable-512.png',
+            sizes: '512x512',
+            type: 'image/png',
+            purpose: 'maskable',
+          },
         ],
       },
     }),
