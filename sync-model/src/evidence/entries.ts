@@ -92,10 +92,7 @@ function entryOf({ id, ownerId, fields, deviceAtStamp }: EvidenceReception, cont
     deviceAt: fields.deviceAt,
     deviceId: parseStamp(deviceAtStamp).deviceId,
   });
-  const channel = context.channels(
-    trueDialHz(fields.tuning.dialHz, setup?.receiverId, atMs, context),
-    fields.targetHz,
-  );
+  const channel = context.channels(trueDialHz(fields, setup?.receiverId, atMs, context), fields.targetHz);
   const { counts, reason } = classifyReception(fields, {
     atMs,
     target: fields.targetId === null ? undefined : input.targets.get(fields.targetId),
@@ -131,14 +128,15 @@ function entryOf({ id, ownerId, fields, deviceAtStamp }: EvidenceReception, cont
   };
 }
 
+/** The dial with its error taken off; as it is where the target tells the channel and the dial is not asked. */
 function trueDialHz(
-  dialHz: number,
+  { tuning, targetHz }: EvidenceReception['fields'],
   receiverId: string | undefined,
   atMs: number,
   { dialChecks }: EntryContext,
 ): number {
-  const checks = receiverId === undefined ? undefined : dialChecks.get(receiverId);
-  return checks ? correctedFrequencyHz(dialHz, checks, atMs).frequencyHz : dialHz;
+  const checks = receiverId === undefined || targetHz !== null ? undefined : dialChecks.get(receiverId);
+  return checks ? correctedFrequencyHz(tuning.dialHz, checks, atMs).frequencyHz : tuning.dialHz;
 }
 
 /** The server blanks a record after its 30 days in the bin: then only id and stamps are left. */
