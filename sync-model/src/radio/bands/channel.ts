@@ -24,7 +24,7 @@ export function channelOf(reception: {
   const band = bandAt(dialHz, region);
   if (band?.service === 'amateur') return { kind: 'band', name: band.name };
   const stepHz = rasterHz(band, region);
-  return { kind: 'channel', hz: Math.max(1, Math.round(dialHz / stepHz)) * stepHz };
+  return { kind: 'channel', hz: Math.round(dialHz / stepHz) * stepHz };
 }
 
 function rasterHz(band: Band | null, region: ItuRegion): number {
