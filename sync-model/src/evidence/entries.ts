@@ -67,7 +67,8 @@ type EntryContext = {
 
 function contextOf(input: EvidenceInput): EntryContext {
   const steps = input.outings.flatMap(({ fields, clockStepsStamp }) =>
-    fields.clockSteps.map(({ at }) => ({ at, deviceId: parseStamp(clockStepsStamp).deviceId })),
+    // Emptied after 30 days in the bin, an outing has lost its steps.
+    (fields.clockSteps ?? []).map(({ at }) => ({ at, deviceId: parseStamp(clockStepsStamp).deviceId })),
   );
   const dialChecks = new Map<string, FrequencyCheck[]>();
   for (const check of input.dialChecks) {
@@ -87,7 +88,7 @@ function contextOf(input: EvidenceInput): EntryContext {
 function entryOf({ id, ownerId, fields, deviceAtStamp }: EvidenceReception, context: EntryContext): Entry {
   const { input } = context;
   const setup = input.setups.get(fields.setupId);
-  const receiver = setup && input.receivers.get(setup.receiverId);
+  const scale = setup && input.receivers.get(setup.receiverId)?.meterScale;
   const { atMs, basis } = correctedBy(context.clocks, {
     deviceAt: fields.deviceAt,
     deviceId: parseStamp(deviceAtStamp).deviceId,
@@ -96,7 +97,7 @@ function entryOf({ id, ownerId, fields, deviceAtStamp }: EvidenceReception, cont
   const { counts, reason } = classifyReception(fields, {
     atMs,
     target: fields.targetId === null ? undefined : input.targets.get(fields.targetId),
-    hasSetup: setup !== undefined,
+    hasSetup: Boolean(setup?.antennaId),
     isExcluded: input.excludedIds?.has(id) ?? false,
   });
   const hour = Math.floor(atMs / HOUR_MS);
@@ -121,7 +122,7 @@ function entryOf({ id, ownerId, fields, deviceAtStamp }: EvidenceReception, cont
     monthKey: monthKeyOf(dayNumber, context.monthKeys),
     heard,
     o: heard ? receptionScore(fields) : null,
-    levelDbm: heard && setup && receiver ? receptionLevelDbm(fields, setup, receiver.meterScale) : null,
+    levelDbm: heard && setup && scale ? receptionLevelDbm(fields, setup, scale) : null,
     isInReview: input.inReviewIds?.has(id) ?? false,
     counts,
     reason,

@@ -1,6 +1,15 @@
 import { describe, expect, it } from 'vitest';
 import { observationsOf } from './observations.js';
-import { anInput, aReception, EVENING, HOUR_MS, MINUTE_MS, scored } from './testing/invented-evidence.js';
+import { squaresOf } from './squares.js';
+import {
+  anInput,
+  aReception,
+  EVENING,
+  HOUR_MS,
+  MINUTE_MS,
+  scored,
+  SETUPS,
+} from './testing/invented-evidence.js';
 
 const idsOf = (rows: readonly { receptionId: string }[]) => rows.map(({ receptionId }) => receptionId);
 
@@ -126,6 +135,30 @@ describe('observationsOf', () => {
     expect(channels[0]).toMatchObject({ channelKey: '40 m', bandKey: '40 m amateur', isWholeBand: true });
   });
 
+  it('should not reach across a step of the clock that an outing has seen', () => {
+    const check = {
+      deleted: false,
+      importId: null,
+      deviceId: 'pebble01',
+      deviceAt: EVENING - HOUR_MS,
+      offsetMs: 5000,
+      uncertaintyMs: 100,
+      method: 'tone' as const,
+      pathKm: null,
+    };
+    const steps = (deviceId: string) => [
+      {
+        fields: { clockSteps: [{ at: EVENING - MINUTE_MS, stepMs: 60_000 }] },
+        clockStepsStamp: `${'0'.repeat(16)}${deviceId}`,
+      },
+    ];
+    const basisWith = (deviceId: string) =>
+      observationsOf(anInput([aReception('r1')], { clockChecks: [check], outings: steps(deviceId) }))
+        .channels[0]?.timeBasis;
+    expect(basisWith('pebble01')).toBe('unchecked');
+    expect(basisWith('moss0002')).toBe('nearest');
+  });
+
   it('should take the attenuator and the preamplifier off the level', () => {
     const { channels } = observationsOf(
       anInput([aReception('r1', { setupId: 'hot', meter: { s: 9, overDb: 10 }, attenuationDb: 20 })], {
@@ -145,5 +178,25 @@ describe('observationsOf', () => {
     };
     const { channels } = observationsOf(anInput([aReception('r1', carried)]));
     expect(channels[0]).toMatchObject({ heard: true, o: null, levelDbm: null });
+  });
+
+  it('should get along with gear, sites and outings that were emptied after the bin', () => {
+    const emptied = (fields: Record<string, null>) => fields as never;
+    const input = anInput(
+      [aReception('r1', { meter: { s: 9, overDb: 0 } }), aReception('r2', { setupId: 'gone' })],
+      {
+        sites: new Map([['dune', emptied({ place: null })]]),
+        receivers: new Map([['bench', emptied({ meterScale: null })]]),
+        setups: new Map([
+          ['bench-wire', SETUPS['bench-wire']],
+          ['gone', emptied({ receiverId: null, antennaId: null })],
+        ]),
+        outings: [{ fields: emptied({ clockSteps: null }), clockStepsStamp: `${'0'.repeat(16)}pebble01` }],
+      },
+    );
+    const { channels, entries } = observationsOf(input);
+    expect(channels).toMatchObject([{ receptionId: 'r1', levelDbm: null }]);
+    expect(entries[1]).toMatchObject({ counts: 'left-out', reason: 'setup-missing' });
+    expect(squaresOf(channels, input.sites, 6)).toEqual([]);
   });
 });

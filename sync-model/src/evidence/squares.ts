@@ -30,7 +30,7 @@ export function sitePlaces(
   return (siteId) => {
     if (places.has(siteId)) return places.get(siteId);
     const site = sites.get(siteId);
-    const place = site && placeOfSite(site, characters);
+    const place = site?.place ? placeOfSite(site, characters) : undefined;
     places.set(siteId, place);
     return place;
   };
