@@ -1,5 +1,5 @@
 import type { DevicePorts } from '@harkmoor/sync-model/device/ports';
-import { createSyncEngine } from '@harkmoor/sync-model/device/sync-engine';
+import { createSyncEngine } from '@harkmoor/sync-model/device/sync-round';
 import { createDexieStore } from '../store/dexie-store';
 import type { OpenLog } from '../store/open-log';
 import { IDLE_SENDING, type SendingStatus } from '../platform/sending';
