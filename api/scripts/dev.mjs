@@ -50,7 +50,8 @@ await withCrew(async (crew) => {
   const api = watch('api', apiArgs, env);
   const viteArgs = [VITE, '--host', '127.0.0.1', '--port', String(port), '--strictPort', 'pwa'];
   const vite = watch('app', viteArgs, { API_URL: `http://127.0.0.1:${apiPort}` });
-  await waitUntilHealthy(address, api); // through the app's dev server: it passes /api on
+  await waitUntilHealthy(`http://127.0.0.1:${apiPort}`, api);
+  await waitUntilHealthy(address, vite); // the app's dev server passes /api on
   const lines = [
     ['App', address],
     ['API', `http://127.0.0.1:${apiPort}/api/docs`],

@@ -1,5 +1,5 @@
 import { spawnSync } from 'node:child_process';
-import { createHash } from 'node:crypto';
+import { randomBytes } from 'node:crypto';
 import fs from 'node:fs';
 import path from 'node:path';
 import { outputOf } from '../setup/processes.mjs';
@@ -27,12 +27,13 @@ export function giveTo(account, place) {
 
 /**
  * The folder for a cluster: inside the data folder, or, when postgres may not pass there (a clone below /root),
- * /var/lib/harkmoor-HASH, the same one at each start.
+ * /var/lib/harkmoor-HASH. A file in the data folder keeps that place, so that a new data folder gets a new cluster.
  */
 export function clusterHome(dataFolder, account) {
   fs.mkdirSync(dataFolder, { recursive: true });
-  if (account.uid === undefined) return path.join(dataFolder, 'postgres');
-  if (spawnSync('test', ['-x', dataFolder], account).status === 0) return path.join(dataFolder, 'postgres');
-  const hash = createHash('sha256').update(path.resolve(dataFolder)).digest('hex').slice(0, 8);
-  return `/var/lib/harkmoor-${hash}`;
+  const mayPass = account.uid === undefined || spawnSync('test', ['-x', dataFolder], account).status === 0;
+  if (mayPass) return path.join(dataFolder, 'postgres');
+  const note = path.join(dataFolder, 'postgres-place');
+  if (!fs.existsSync(note)) fs.writeFileSync(note, `/var/lib/harkmoor-${randomBytes(4).toString('hex')}`);
+  return fs.readFileSync(note, 'utf8').trim();
 }

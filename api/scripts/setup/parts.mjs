@@ -7,11 +7,11 @@ import { startScript, until } from './processes.mjs';
 const MAIL_CATCHER = path.join(import.meta.dirname, '../mail-catcher.mjs');
 const MIGRATE = 'api/dist/src/migrate.js';
 const SEED = 'api/dist/scripts/demo/seed.js';
-const HEALTH_LIMIT_MS = 60_000;
+const HEALTH_LIMIT_MS = 120_000;
 
 /** Starts the database of a data folder as part of the crew. Resolves to what startPostgres gives. */
 export async function startDatabase(crew, claim, dataFolder) {
-  const postgres = await startPostgres({ dataFolder: dataFolder });
+  const postgres = await startPostgres({ dataFolder });
   crew.add(() => postgres.stop());
   claim.note('postgres', postgres.keeper.pid);
   return postgres;
@@ -35,13 +35,13 @@ export async function prepareData(crew, root, env) {
   if (fs.existsSync(seed)) await crew.run([...node, seed], 'making the demo club', env);
 }
 
-/** Waits until the API says that all is ready; fails when it ends before. */
+/** Waits until `child` answers at an address that all is ready; fails when it ends before. */
 export async function waitUntilHealthy(address, child) {
   let ended = false;
   void child.done.then(() => (ended = true));
   const isHealthy = async () => (await fetch(`${address}/api/health`).catch(() => null))?.ok === true;
   await until(async () => ended || (await isHealthy()), HEALTH_LIMIT_MS);
-  if (ended) throw new PlainFailure('The API ended while it started.');
+  if (ended) throw new PlainFailure(`What should answer at ${address} ended while it started.`);
   if (!(await isHealthy()))
-    throw new PlainFailure(`${address}/api/health did not say that all is ready within a minute.`);
+    throw new PlainFailure(`${address}/api/health did not say that all is ready within two minutes.`);
 }
