@@ -20,4 +20,6 @@ createRoot(root).render(
     <App />
   </StrictMode>,
 );
-registerWorker();
+registerWorker().catch((error: unknown) =>
+  console.error('The application is not kept on this device', error),
+);

@@ -9,7 +9,7 @@ import { InstallSection } from './InstallSection';
 import { OfflineSection } from './OfflineSection';
 
 const LOOKS: readonly { value: ThemeChoice; label: string }[] = [
-  { value: 'system', label: 'As the device' },
+  { value: 'system', label: 'Device' },
   { value: 'day', label: 'Day' },
   { value: 'dusk', label: 'Dusk' },
   { value: 'red-night', label: 'Red night' },
@@ -33,7 +33,10 @@ export function SettingsPage() {
           value={choice}
           onChange={(value) => setTheme(value ?? 'system')}
         />
-        <p className="soft small">Red night shows nothing but red, so that eyes stay used to the dark.</p>
+        <p className="soft small">
+          Device follows its light or dark setting. Red night shows nothing but red, so that eyes stay used to
+          the dark.
+        </p>
       </Section>
       <Section title="In the field">
         <ToggleField

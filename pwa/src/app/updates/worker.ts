@@ -1,5 +1,6 @@
 import { useSyncExternalStore } from 'react';
-import { Workbox } from 'workbox-window';
+import type { Workbox } from 'workbox-window';
+import { nowMs } from '../../platform/clock';
 import { keepFineMap } from '../../platform/map-data';
 import { anyUnsavedWork, onAllSaved } from '../../platform/unsaved-work';
 import { onVisibilityChange } from '../../platform/visibility';
@@ -12,29 +13,32 @@ const listeners = new Set<() => void>();
  * Registers the service worker. A new version waits until the person takes it, or until the page is hidden with no
  * form open; it never reloads a page that holds something unsaved.
  */
-export function registerWorker(): void {
+export async function registerWorker(): Promise<void> {
   if (!import.meta.env.PROD || !('serviceWorker' in navigator)) return;
-  const workbox = new Workbox('/sw.js');
   const wasControlled = navigator.serviceWorker.controller !== null;
+  navigator.serviceWorker.addEventListener('controllerchange', () => {
+    if (wasControlled || waiting) reloadWhenSaved();
+  });
+  const { Workbox } = await import('workbox-window');
+  const workbox = new Workbox('/sw.js');
   workbox.addEventListener('waiting', () => {
     waiting = workbox;
     tellAll();
   });
-  navigator.serviceWorker.addEventListener('controllerchange', () => {
-    if (wasControlled || waiting) reloadWhenSaved();
-  });
-  let lookedAtMs = Date.now();
+  followVisibility(workbox);
+  void navigator.serviceWorker.ready.then(() => requestIdle(() => void keepFineMap()));
+  await workbox.register();
+}
+
+/** A page that is put away takes the waiting version; one that comes back looks for a new one, hourly at most. */
+function followVisibility(workbox: Workbox): void {
+  let lookedAtMs = nowMs();
   onVisibilityChange((visible) => {
     if (!visible && waiting && !anyUnsavedWork()) applyUpdate();
-    if (visible && Date.now() - lookedAtMs > LOOK_AGAIN_MS) {
-      lookedAtMs = Date.now();
-      workbox.update().catch(() => undefined); // no signal: the next look comes
-    }
+    if (!visible || nowMs() - lookedAtMs < LOOK_AGAIN_MS) return;
+    lookedAtMs = nowMs();
+    workbox.update().catch(() => undefined); // no signal: the next look comes
   });
-  workbox
-    .register()
-    .catch((error: unknown) => console.error('The application could not be kept on this device', error));
-  void navigator.serviceWorker.ready.then(() => requestIdle(() => void keepFineMap()));
 }
 
 /** Lets the waiting version take over; the page reloads once it has. */

@@ -10,7 +10,7 @@ type ToggleFieldProps = Omit<FieldProps, 'required'> & {
 export function ToggleField(props: ToggleFieldProps) {
   const id = useId();
   return (
-    <div className="hm-field">
+    <div className="hm-field hm-toggle-field">
       <label className="hm-toggle-line">
         <span>{props.label}</span>
         <input
