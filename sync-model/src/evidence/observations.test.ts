@@ -98,6 +98,17 @@ describe('observationsOf', () => {
     ]);
   });
 
+  it('should keep two targets apart that were heard at one mark of the dial', () => {
+    const { channels } = observationsOf(
+      anInput([
+        aReception('r1', { targetHz: 6_070_000 }),
+        aReception('r2', { targetHz: 6_075_000 }),
+        aReception('r3', { targetId: null, targetHz: null, tuning: { dialHz: 5_000_000, mode: 'AM' } }),
+      ]),
+    );
+    expect(channels.map(({ channelKey }) => channelKey)).toEqual(['6070000', '6075000', '5000000']);
+  });
+
   it('should take the error of the dial off before it looks for the raster', () => {
     // 500 ppm high at 6 070 kHz is 3 kHz: the dial shows 6 073, nearer to 6 075.
     const off = aReception('r1', {
