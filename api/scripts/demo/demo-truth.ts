@@ -22,10 +22,22 @@ export function trueHeardProbability(target: DemoTarget, antenna: DemoAntenna, t
 }
 
 function targetLogit(target: DemoTarget, atMs: number): number {
-  const altitude = sunAltitudeDeg(REFERENCE, atMs);
+  const altitude = referenceAltitudeDeg(atMs);
   const dayShare = logistic(altitude / (TURN_WIDTH_DEG / 2));
   const openShare = target.heardBy === 'night' ? 1 - dayShare : dayShare;
   return target.worstLogit + (target.bestLogit - target.worstLogit) * openShare;
+}
+
+const altitudes = new Map<number, number>();
+
+/** Four months have 96 such hours, asked for thousands of times. */
+function referenceAltitudeDeg(atMs: number): number {
+  let altitude = altitudes.get(atMs);
+  if (altitude === undefined) {
+    altitude = sunAltitudeDeg(REFERENCE, atMs);
+    altitudes.set(atMs, altitude);
+  }
+  return altitude;
 }
 
 function antennaLogit(antenna: DemoAntenna, frequencyHz: number): number {
