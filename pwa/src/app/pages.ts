@@ -10,6 +10,7 @@ const LOADERS: Readonly<Record<PageName, LoadPage>> = {
   pad: () => import('../features/field/PadPage').then((m) => ({ default: m.PadPage })),
   startOuting: () =>
     import('../features/field/StartOutingPage').then((m) => ({ default: m.StartOutingPage })),
+  frequency: () => import('../features/field/FrequencyPage').then((m) => ({ default: m.FrequencyPage })),
   sites: () => import('../features/field/SitesPage').then((m) => ({ default: m.SitesPage })),
   site: () => import('../features/field/SitePage').then((m) => ({ default: m.SitePage })),
   logbook: () => import('../features/logbook/LogbookPage').then((m) => ({ default: m.LogbookPage })),

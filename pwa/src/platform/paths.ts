@@ -5,7 +5,8 @@
 export const paths = {
   field: () => '/field',
   pad: (query: PadQuery = {}) => withQuery('/field/pad', query),
-  startOuting: () => '/field/start',
+  startOuting: (query: Query = {}) => withQuery('/field/start', query),
+  frequency: () => '/field/frequency',
   sites: () => '/field/sites',
   site: (id: string) => `/field/sites/${encodeURIComponent(id)}`,
   newSite: () => '/field/sites/new',
@@ -47,6 +48,7 @@ export const PATTERNS = {
   field: '/field',
   pad: '/field/pad',
   startOuting: '/field/start',
+  frequency: '/field/frequency',
   sites: '/field/sites',
   site: '/field/sites/:id',
   logbook: '/logbook',
@@ -85,7 +87,13 @@ export type PadQuery = {
   readonly frequencyHz?: number;
   /** The moment of the tap, ms UTC. */
   readonly atMs?: number;
-  readonly means?: string;
+  /** How it came to be listened for. */
+  readonly means?: 'round' | 'planned' | 'chance';
+  readonly roundNo?: number;
+  readonly mode?: string;
+  /** The reception whose scores stand as outlines: *Same again*. */
+  readonly again?: string;
+  /** The id that the new reception, and its draft, will have. */
   readonly draft?: string;
 };
 

@@ -1,0 +1,32 @@
+import { utcTime } from '../../../platform/utc-text';
+
+type TimeMendProps = {
+  readonly atMs: number;
+  /** When it was tapped, or what the entry holds: the way back. */
+  readonly tappedMs: number;
+  readonly onTime: (atMs: number) => void;
+};
+
+const MINUTE_MS = 60_000;
+
+/** The tap came late: one minute or five earlier, and back again. */
+export function TimeMend({ atMs, tappedMs, onTime }: TimeMendProps) {
+  return (
+    <div className="fd-time" role="group" aria-label="Time of the entry">
+      <span className="num" role="status">
+        Heard at <b>{utcTime(atMs)}</b> UTC
+      </span>
+      <button type="button" aria-label="One minute earlier" onClick={() => onTime(atMs - MINUTE_MS)}>
+        −1 min
+      </button>
+      <button type="button" aria-label="Five minutes earlier" onClick={() => onTime(atMs - 5 * MINUTE_MS)}>
+        −5 min
+      </button>
+      {atMs === tappedMs ? null : (
+        <button type="button" onClick={() => onTime(tappedMs)}>
+          As it was
+        </button>
+      )}
+    </div>
+  );
+}

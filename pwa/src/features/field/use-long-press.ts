@@ -1,0 +1,47 @@
+import { useEffect, useRef, type MouseEvent, type PointerEvent } from 'react';
+
+const LONG_PRESS_MS = 500;
+const MOVE_LIMIT_PX = 12;
+
+/**
+ * A tap and a long press on one button. Each is told the moment at which the finger came down, ms UTC of the
+ * device. A press that moves is a scroll and neither.
+ */
+export function useLongPress(acts: { onTap: (atMs: number) => void; onLongPress: (atMs: number) => void }) {
+  const press = useRef<{ atMs: number; x: number; y: number; isSpent: boolean } | null>(null);
+  const timer = useRef<ReturnType<typeof setTimeout>>(undefined);
+  useEffect(() => () => clearTimeout(timer.current), []);
+  const spend = (): void => {
+    clearTimeout(timer.current);
+    if (press.current) press.current.isSpent = true;
+  };
+  return {
+    onPointerDown: ({ clientX: x, clientY: y, button }: PointerEvent) => {
+      if (button !== 0) return;
+      const atMs = Date.now();
+      press.current = { atMs, x, y, isSpent: false };
+      clearTimeout(timer.current);
+      timer.current = setTimeout(() => {
+        spend();
+        acts.onLongPress(atMs);
+      }, LONG_PRESS_MS);
+    },
+    onPointerMove: ({ clientX, clientY }: PointerEvent) => {
+      const from = press.current;
+      if (from && Math.hypot(clientX - from.x, clientY - from.y) > MOVE_LIMIT_PX) clearTimeout(timer.current);
+    },
+    onPointerUp: () => clearTimeout(timer.current),
+    onPointerCancel: () => {
+      spend();
+      press.current = null;
+    },
+    onContextMenu: (event: MouseEvent) => event.preventDefault(),
+    onClick: () => {
+      const from = press.current;
+      press.current = null;
+      clearTimeout(timer.current);
+      if (from?.isSpent) return;
+      acts.onTap(from?.atMs ?? Date.now());
+    },
+  };
+}
