@@ -1,20 +1,11 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { correctedAt } from './corrected-time.js';
-import type { EvidenceInput, EvidenceReception } from './evidence-input.js';
 import { filterObservations, rateFor } from './filter.js';
 import { heardRate } from './heard-rate.js';
 import { observationsOf, type Observation } from './observations.js';
 import { squareEvidence } from './summary.js';
-import {
-  anInput,
-  aReception,
-  DAY_MS,
-  HOUR_MS,
-  MINUTE_MS,
-  scored,
-  SETUPS,
-} from './testing/invented-evidence.js';
+import { DAY_MS, HOUR_MS, MINUTE_MS } from './testing/invented-evidence.js';
+import { inputOf, recount, type Try } from './testing/invented-history.js';
 
 // Goal: whatever a club has logged, on however many phones and in whatever order it arrived, the count is the one
 // that product.md describes.
@@ -41,9 +32,9 @@ const aTry = fc.record({
     'import' as const,
   ),
   identity: fc.constantFrom('sure' as const, 'sure' as const, 'tentative' as const, 'unknown' as const),
-  target: fc.constantFrom('tern', 'plover', 'dunlin', null),
+  target: fc.constantFrom('tern' as const, 'plover' as const, 'dunlin' as const, null),
   siteId: fc.constantFrom('dune', 'heath'),
-  setupId: fc.constantFrom('bench-wire', 'bench-whip', 'lab-wire'),
+  setupId: fc.constantFrom('bench-wire' as const, 'bench-whip' as const, 'lab-wire' as const),
   // 17:30 to 22:10 on three dates; the second is silent for `tern`.
   deviceAt: fc
     .tuple(fc.nat(2), fc.integer({ min: 35, max: 44 }), fc.constantFrom(0, 1, 2, 3, 9, 10))
@@ -56,8 +47,6 @@ const aTry = fc.record({
   ownerId: fc.constantFrom('asta', 'birk'),
   o: fc.constantFrom(1 as const, 3 as const, 5 as const, 'X' as const),
 });
-type Try = typeof aTry extends fc.Arbitrary<infer T> ? T : never;
-
 const aClockCheck = fc.record({
   deleted: fc.constantFrom(false, false, true),
   importId: fc.constant(null),
@@ -74,64 +63,6 @@ const aHistory = fc.record({
   clockChecks: fc.array(aClockCheck, { maxLength: 4 }),
   excludedAt: fc.array(fc.nat(39), { maxLength: 3 }),
 });
-type History = typeof aHistory extends fc.Arbitrary<infer T> ? T : never;
-
-const HZ = { tern: 6_070_000, plover: 6_070_000, dunlin: 5_000_000 };
-
-function receptionOf({ id, target, o, ...one }: Try): EvidenceReception {
-  const dialHz = target === 'dunlin' || target === null ? 5_000_000 : 6_070_000;
-  const { deviceId, ownerId, ...fields } = one;
-  return aReception(
-    id,
-    {
-      ...fields,
-      targetId: target,
-      targetHz: target && HZ[target as keyof typeof HZ],
-      tuning: { dialHz, mode: 'AM' },
-      sinpo: one.outcome === 'heard' ? scored(o) : null,
-    },
-    { deviceId, ownerId },
-  );
-}
-
-function inputOf({ tries, clockChecks, excludedAt }: History): EvidenceInput {
-  const excluded = excludedAt.flatMap((at) => tries[at]?.id ?? []);
-  return anInput(tries.map(receptionOf), { clockChecks, excludedIds: new Set(excluded) });
-}
-
-/** The recount: ids of the first tries, each with the text of its cell. */
-function recount(history: History, stream: 'channels' | 'targets'): Map<string, string> {
-  const excluded = new Set(history.excludedAt.flatMap((at) => history.tries[at]?.id ?? []));
-  const timed = history.tries.map((one) => ({
-    ...one,
-    atMs: correctedAt(one, history.clockChecks, []).atMs,
-  }));
-  timed.sort((a, b) => a.atMs - b.atMs || (a.id < b.id ? -1 : 1));
-  const cells = new Map<string, string>();
-  for (const one of timed) {
-    if (one.deleted || excluded.has(one.id)) continue;
-    if (one.basis !== 'round' && one.basis !== 'planned') continue;
-    if (one.outcome === 'skipped') continue;
-    if (one.outcome === 'nil' && one.durationS !== null && one.durationS < 10) continue;
-    if (one.target === 'tern') {
-      const date = new Date(one.atMs);
-      if (date.toISOString().startsWith('2026-11-20')) continue;
-      const msOfDay = one.atMs % DAY_MS;
-      if (msOfDay < 18 * HOUR_MS - 2 * MINUTE_MS || msOfDay > 21 * HOUR_MS + 2 * MINUTE_MS) continue;
-    }
-    if (stream === 'targets') {
-      if (one.target === null) continue;
-      if (one.outcome === 'heard' && one.identity !== 'sure') continue;
-    }
-    const subject =
-      stream === 'targets' ? one.target : one.target === null || one.target === 'dunlin' ? 5000 : 6070;
-    const hour = new Date(one.atMs).toISOString().slice(0, 13);
-    const cell = [subject, one.siteId, SETUPS[one.setupId].antennaId, hour].join(' ');
-    if (!cells.has(cell)) cells.set(cell, one.id);
-  }
-  return cells;
-}
-
 const rowsOf = (observations: readonly Observation[]) =>
   observations.map(({ receptionId, heard, o, hourUtc, dayNumber }) => [
     receptionId,
