@@ -1,4 +1,4 @@
-import { clientsClaim } from 'workbox-core';
+import { cacheNames, clientsClaim } from 'workbox-core';
 import {
   cleanupOutdatedCaches,
   createHandlerBoundToURL,
@@ -30,14 +30,23 @@ self.addEventListener('message', (event) => {
   if (message?.type === 'COUNT_MISSING') event.waitUntil(answerMissing(event.ports[0]));
 });
 
-/** Answers with the number of installed files that are not in the cache, looked at one by one. */
+/** Answers with the number of installed files that are not in the cache, looked at one by one; then fetches them again. */
 async function answerMissing(port: MessagePort | undefined): Promise<void> {
   const urls = entries.map((entry) => (typeof entry === 'string' ? entry : entry.url));
-  const found = await Promise.all(
-    urls.map(async (url) => {
-      const key = getCacheKeyForURL(url);
-      return key !== undefined && (await caches.match(key)) !== undefined;
-    }),
-  );
-  port?.postMessage({ missing: found.filter((isThere) => !isThere).length, total: urls.length });
+  const found = await Promise.all(urls.map(async (url) => (await caches.match(keyOf(url))) !== undefined));
+  const missing = urls.filter((_, index) => !found[index]);
+  port?.postMessage({ missing: missing.length, total: urls.length });
+  await Promise.all(missing.map(fetchAgain));
+}
+
+/** A browser that ran out of room may have thrown out a single file; without signal it stays missing, and is told. */
+async function fetchAgain(url: string): Promise<void> {
+  const response = await fetch(url, { cache: 'reload' }).catch(() => null);
+  if (response?.ok) await (await caches.open(cacheNames.precache)).put(keyOf(url), response);
+}
+
+function keyOf(url: string): string {
+  const key = getCacheKeyForURL(url);
+  if (key === undefined) throw new Error(`${url} is not among the installed files`);
+  return key;
 }
