@@ -7,6 +7,9 @@ export class Migration20261201100000 extends Migration {
   }
 }
 
+/** Rows of one transaction may come in any order; their references are checked at its end. */
+const LATE = 'deferrable initially deferred';
+
 const ACCOUNT_TABLES = [
   `create table account (
     id uuid primary key,
@@ -18,7 +21,7 @@ const ACCOUNT_TABLES = [
   )`,
   `create table device_session (
     id uuid primary key,
-    account_id uuid not null references account on delete cascade,
+    account_id uuid not null references account on delete cascade ${LATE},
     device_id varchar(8) not null,
     device_name varchar(60) not null,
     created_at bigint not null,
@@ -32,14 +35,14 @@ const ACCOUNT_TABLES = [
   'create index device_session_account on device_session (account_id)',
   `create table refresh_token (
     token_hash text primary key,
-    session_id uuid not null references device_session on delete cascade,
+    session_id uuid not null references device_session on delete cascade ${LATE},
     issued_at bigint not null
   )`,
   'create index refresh_token_session on refresh_token (session_id, issued_at)',
   `create table mail_token (
     id uuid primary key,
     token_hash text not null unique,
-    account_id uuid not null references account on delete cascade,
+    account_id uuid not null references account on delete cascade ${LATE},
     purpose text not null check (purpose in ('confirm', 'reset')),
     expires_at bigint not null,
     used_at bigint
@@ -57,7 +60,7 @@ const ACCOUNT_TABLES = [
     kind text not null check (kind in ('confirm', 'reset', 'sign-up-known')),
     to_email varchar(254) not null,
     to_name varchar(60) not null,
-    mail_token_id uuid not null references mail_token on delete cascade,
+    mail_token_id uuid not null references mail_token on delete cascade ${LATE},
     tries integer not null,
     next_try_at bigint not null
   )`,
@@ -82,8 +85,8 @@ const CLUB_TABLES = [
   // an index and no key: a code is looked up before the club is known
   'create index club_join_code on club (join_code_hash) where join_code_hash is not null',
   `create table membership (
-    club_id uuid not null references club on delete cascade,
-    account_id uuid not null references account,
+    club_id uuid not null references club on delete cascade ${LATE},
+    account_id uuid not null references account ${LATE},
     name varchar(60) not null,
     role text not null check (role in ('member', 'organizer', 'admin')),
     joined_at bigint not null,

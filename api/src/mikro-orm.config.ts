@@ -23,8 +23,6 @@ export function databaseOptions(databaseUrl: string, connectionsMax = 10) {
     ],
     extensions: [Migrator],
     pool: { min: 0, max: connectionsMax },
-    // values of rows must not get into error messages, and so into the log
-    driverOptions: { compileSqlOnError: false },
     migrations: {
       migrationsList: [
         { name: 'Migration20261201100000', class: Migration20261201100000 },

@@ -48,7 +48,7 @@ export async function makeApp(environment: Record<string, string> = {}): Promise
   });
   setupApp(app, log);
   await app.listen(0, '127.0.0.1');
-  const orm = app.get(MikroORM);
+  const orm = app.get<MikroORM>(MikroORM);
   return { app, url: await app.getUrl(), orm, clock, close: () => closeApp(app, databaseUrl) };
 }
 

@@ -2,6 +2,7 @@ import { EntityManager } from '@mikro-orm/postgresql';
 import { Injectable } from '@nestjs/common';
 import { MailQueue } from '../mail/mail-queue.js';
 import { Clock } from '../platform/clock/clock.js';
+import { inTransaction } from '../platform/database/in-transaction.js';
 import { Refusal } from '../platform/errors/refusal.js';
 import { Account } from './account.entity.js';
 import { DeviceSession } from './device-session.entity.js';
@@ -26,10 +27,7 @@ export class PasswordReset {
     if (refusal) return refusal;
     const account = await this.em.findOne(Account, { email });
     if (account && !(await this.allowance.ofAddress(email))) {
-      await this.em.transactional((tx) => {
-        this.links.put(tx, account, 'reset');
-        return Promise.resolve();
-      });
+      await inTransaction(this.em, (tx) => this.links.put(tx, account, 'reset'));
       this.queue.wake();
     }
     return null;

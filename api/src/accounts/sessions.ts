@@ -58,7 +58,9 @@ export class Sessions {
     if (!account || !fits)
       return new Refusal('wrong-credentials', 'The address or the password is not right.');
     await this.attempts.clear(subject);
-    if (needsRehash(account.passwordHash)) account.passwordHash = await hashPassword(password);
+    if (needsRehash(account.passwordHash)) {
+      await this.em.nativeUpdate(Account, { id: account.id }, { passwordHash: await hashPassword(password) });
+    }
     return this.open(account.id, deviceId, deviceName);
   }
 
@@ -72,7 +74,6 @@ export class Sessions {
       const earlier = await tx.find(DeviceSession, { accountId, deviceId, endedAt: null });
       for (const session of earlier) session.end('signed-in-again', nowMs);
       tx.persist(new DeviceSession({ id: sessionId, accountId, deviceId, deviceName, firstHash, nowMs }));
-      await tx.flush();
       tx.persist(new RefreshToken(firstHash, sessionId, nowMs));
       return { accountId, sessionId, refreshToken };
     });

@@ -5,6 +5,7 @@ import { v7 as newId } from 'uuid';
 import { MyLog } from '../clubs/my-log.js';
 import { MailQueue } from '../mail/mail-queue.js';
 import { Clock } from '../platform/clock/clock.js';
+import { inTransaction } from '../platform/database/in-transaction.js';
 import { Refusal } from '../platform/errors/refusal.js';
 import { Account } from './account.entity.js';
 import { MailAllowance } from './mail-allowance.js';
@@ -65,9 +66,8 @@ export class SignUp {
     const createdAt = this.clock.nowMs();
     const account = new Account({ id: newId(), email, name, passwordHash, createdAt });
     try {
-      await this.em.fork().transactional(async (tx) => {
+      await inTransaction(this.em.fork(), (tx) => {
         tx.persist(account);
-        await tx.flush();
         this.myLog.make(tx, account);
         this.links.put(tx, account, 'confirm');
       });
@@ -83,9 +83,6 @@ export class SignUp {
   /** An address that got many mails this hour gets no more, and nobody is told. */
   private async mail(account: Account, kind: 'sign-up-known' | 'confirm'): Promise<void> {
     if (await this.allowance.ofAddress(account.email)) return;
-    await this.em.transactional((tx) => {
-      this.links.put(tx, account, kind);
-      return Promise.resolve();
-    });
+    await inTransaction(this.em, (tx) => this.links.put(tx, account, kind));
   }
 }

@@ -3,6 +3,7 @@ import { Injectable } from '@nestjs/common';
 import type { SignedInAs } from '../platform/access/signed-in.js';
 import { Attempts } from '../platform/attempts/attempts.js';
 import { Clock } from '../platform/clock/clock.js';
+import { inTransaction } from '../platform/database/in-transaction.js';
 import { Refusal } from '../platform/errors/refusal.js';
 import { Secrets } from '../platform/secrets/secrets.js';
 import { ClubAccess } from './club-access.js';
@@ -35,8 +36,8 @@ export class ClubJoining {
     const refusal = confirmationRefusal(me.isConfirmed);
     if (refusal) return refusal;
     const founder = { id: me.accountId, name: me.name };
-    const club = await this.em.transactional((tx) =>
-      Promise.resolve(foundClub(tx, founder, { kind: 'club', name, ituRegion }, this.clock.nowMs())),
+    const club = await inTransaction(this.em, (tx) =>
+      foundClub(tx, founder, { kind: 'club', name, ituRegion }, this.clock.nowMs()),
     );
     return { clubId: club.id, role: 'admin', card: club.card() };
   }

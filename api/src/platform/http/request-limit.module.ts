@@ -12,6 +12,8 @@ const MINUTE_MS = 60_000;
     ThrottlerModule.forRootAsync({
       inject: [Configuration],
       useFactory: ({ requestsPerMinute }: Configuration) => ({
+        // how many are left is nobody's business; a refusal says how long to wait
+        setHeaders: false,
         throttlers: [{ ttl: MINUTE_MS, limit: requestsPerMinute }],
         getTracker: (request: Record<string, unknown>) => networkOf(String(request.ip)),
         // one count for all routes: the default counts each route by itself

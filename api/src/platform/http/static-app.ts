@@ -11,7 +11,7 @@ const ASSETS = `${sep}assets${sep}`;
 export function staticApp(folder: string): Router {
   const router = Router();
   const index = join(folder, 'index.html');
-  router.use(serveStatic(folder, { index: 'index.html', setHeaders: cacheHeaders, fallthrough: true }));
+  router.use(serveStatic(folder, { index: 'index.html', setHeaders: cacheHeaders, redirect: false }));
   router.get('/{*path}', (request, response, next) => {
     if (/^\/(api|assets)(\/|$)/.test(request.path) || !existsSync(index)) return next();
     response.setHeader('Cache-Control', 'no-cache');

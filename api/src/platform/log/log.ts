@@ -1,3 +1,4 @@
+import { DriverException } from '@mikro-orm/core';
 import type { LoggerService } from '@nestjs/common';
 import { pino, stdTimeFunctions, type Logger } from 'pino';
 
@@ -11,11 +12,14 @@ export function createLog(level: string): Logger {
   });
 }
 
-/** A database error carries the values of the row that it failed on; only names, codes and the stack are kept. */
+/** A database error's text carries the values of the row that it failed on: code, constraint and frames are kept. */
 function bareError(error: unknown): object {
   if (!(error instanceof Error)) return { name: typeof error };
+  const { name, message, stack } = error;
+  const frames = stack?.split('\n').filter((line) => line.startsWith('    at '));
+  if (!(error instanceof DriverException)) return { name, message, frames };
   const { code, constraint } = error as { code?: unknown; constraint?: unknown };
-  return { name: error.name, code, constraint, stack: error.stack };
+  return { name, code, constraint, frames };
 }
 
 /** Nest's own messages in the same log; its list of routes and modules is for debugging. */
