@@ -120,9 +120,16 @@ async function runRounds(
   const times: StoreTimes = { read: 0, write: 0, history: 0, lock: 0, page: 0, ends: 0 };
   const store = new PostgresHubStore(orm.em.getKnex(), server.app.get(SyncFeatures));
   const ports = { store: timedStore(store, times), nowMs: () => Date.now(), newId: () => v7() };
+  let cursor = rounds[0]!.clubs[0]!.cursor;
   const started = performance.now();
   for (const round of rounds) {
-    mustBeApplied(await answerRound(ports, { accountId }, round), round.clubs[0]!.changes!.length);
+    const { changes = [], clubId } = round.clubs[0]!;
+    const answer = await answerRound(
+      ports,
+      { accountId },
+      { ...round, clubs: [{ clubId, historyId: null, cursor, changes }] },
+    );
+    cursor = mustBeApplied(answer, changes.length);
   }
   return { ...times, total: performance.now() - started };
 }

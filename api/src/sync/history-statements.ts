@@ -18,15 +18,25 @@ export const HISTORY_INSERT: Statement = {
     on conflict (club_id, record_type, record_id, field, replaced_stamp, kept_stamp) do nothing`,
 };
 
-/** `$1` club, `$2` ids of records. */
+/** `$1` club, `$2` and `$3` types and ids of records, pairwise. Goes through the rows of these records alone. */
 export const HISTORY_TRIM: Statement = {
   name: 'sync-history-trim',
-  text: `delete from history where club_id = $1 and id in (
-    select id from (
-      select id, row_number() over (partition by record_type, record_id order by clash desc, at desc, id desc) as place
-      from history where club_id = $1 and record_id = any($2::uuid[])
-    ) ranked where place > ${HISTORY_ROWS_PER_RECORD_MAX})`,
+  text: `delete from history using (
+      select surplus.id from unnest($2::text[], $3::uuid[]) as record(type, id) cross join lateral (
+        select history.id from history
+        where club_id = $1 and record_type = record.type and record_id = record.id
+        order by clash desc, at desc, history.id desc offset ${HISTORY_ROWS_PER_RECORD_MAX}
+      ) surplus
+    ) gone where history.club_id = $1 and history.id = gone.id`,
 };
+
+/** The values of `HISTORY_TRIM` beside the club: each record that the rows belong to, once. */
+export function historyTrimValues(history: readonly HistoryRow[]): [string[], string[]] {
+  const records = new Map(
+    history.map(({ recordType, recordId }) => [`${recordType} ${recordId}`, recordType]),
+  );
+  return [[...records.values()], [...records.keys()].map((key) => key.slice(key.indexOf(' ') + 1))];
+}
 
 export function historyInsertValue(history: readonly HistoryRow[]): string {
   return JSON.stringify(

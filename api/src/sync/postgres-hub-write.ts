@@ -14,6 +14,7 @@ import {
   HISTORY_TRIM,
   historyInsertValue,
   historyReplacedValue,
+  historyTrimValues,
 } from './history-statements.js';
 import { readStatement, referredStatement, upsertStatement } from './record-statements.js';
 import type { RecordTable } from './record-table.js';
@@ -80,7 +81,7 @@ export class PostgresHubWrite implements HubWrite {
     }
     if (history.length > 0) {
       await this.query(HISTORY_INSERT, [this.clubId, historyInsertValue(history)]);
-      await this.query(HISTORY_TRIM, [this.clubId, [...new Set(history.map(({ recordId }) => recordId))]]);
+      await this.query(HISTORY_TRIM, [this.clubId, ...historyTrimValues(history)]);
     }
     await this.features.clubs().setSeq(this.query, this.clubId, seq);
   }
@@ -102,15 +103,18 @@ function hubRecord(type: WritableType, row: StoredRow): HubRecord {
   return stamps ? { ...record, stamps } : record;
 }
 
-/** The row of a record by column; a field that the record does not hold is null. */
+/** The row of a record by column; what is null is left out, which the upsert reads as null. */
 function columnValues(table: RecordTable, record: HubRecord): Record<string, unknown> {
   const row: Record<string, unknown> = {
     id: record.id,
     owner_id: record.ownerId,
     seq: record.seq,
     stamp: record.at,
-    stamps: record.stamps ?? null,
+    stamps: record.stamps,
   };
-  for (const { field, column } of table.columns) row[column] = record.fields[field] ?? null;
+  for (const { field, column } of table.columns) {
+    const value = record.fields[field];
+    if (value !== null) row[column] = value;
+  }
   return row;
 }

@@ -116,7 +116,7 @@ describe('the tables of the logbook', () => {
     const reference = keys.filter(
       ({ table, key }) => !(table === 'membership' && key === 'membership_account_id_fkey'),
     );
-    expect(reference.length).toBeGreaterThan(40);
+    expect(reference.length).toBeGreaterThan(35);
     for (const key of reference) {
       expect(key).toMatchObject({ first: 'club_id' });
       expect([null, 'club_id']).toContain(key.refers);

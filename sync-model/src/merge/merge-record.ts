@@ -25,5 +25,6 @@ export function isLater(
   current: { value: FieldValue; stamp: Stamp },
 ): boolean {
   if (incoming.stamp !== current.stamp) return incoming.stamp > current.stamp;
+  if (incoming.value === current.value) return false;
   return canonicalJson(incoming.value) > canonicalJson(current.value);
 }
