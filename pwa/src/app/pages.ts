@@ -11,8 +11,8 @@ const LOADERS: Readonly<Record<PageName, LoadPage>> = {
   startOuting: () =>
     import('../features/field/StartOutingPage').then((m) => ({ default: m.StartOutingPage })),
   frequency: () => import('../features/field/FrequencyPage').then((m) => ({ default: m.FrequencyPage })),
-  sites: () => import('../features/field/SitesPage').then((m) => ({ default: m.SitesPage })),
-  site: () => import('../features/field/SitePage').then((m) => ({ default: m.SitePage })),
+  sites: () => import('../features/field/sites/SitesPage').then((m) => ({ default: m.SitesPage })),
+  site: () => import('../features/field/sites/SitePage').then((m) => ({ default: m.SitePage })),
   logbook: () => import('../features/logbook/LogbookPage').then((m) => ({ default: m.LogbookPage })),
   reception: () => import('../features/logbook/ReceptionPage').then((m) => ({ default: m.ReceptionPage })),
   coverage: () => import('../features/coverage/CoveragePage').then((m) => ({ default: m.CoveragePage })),

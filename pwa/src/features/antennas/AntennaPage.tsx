@@ -1,4 +1,5 @@
 import { ANTENNA_KINDS, antennaSchema, type Antenna } from '@harkmoor/sync-model/records/antenna';
+import { plainAntenna } from '@harkmoor/sync-model/records/gear-defaults';
 import { useParams } from 'react-router-dom';
 import { NumberField } from '../../design/form/NumberField';
 import { SelectField } from '../../design/form/SelectField';
@@ -19,20 +20,7 @@ import { useGearActs } from './data/use-gear-acts';
 const BACK = { to: paths.antennas(), label: 'Antennas' };
 const KINDS = ANTENNA_KINDS.map((kind) => ({ value: kind, label: ANTENNA_KIND_WORDS[kind] }));
 
-const NEW_ANTENNA: Antenna = {
-  deleted: false,
-  importId: null,
-  name: '',
-  kind: 'wire',
-  lengthM: null,
-  heightM: null,
-  azimuthDeg: null,
-  gainDb: null,
-  sharedUse: false,
-  replaces: null,
-  notes: null,
-  retiredAt: null,
-};
+const NEW_ANTENNA = plainAntenna('', 'wire');
 
 /** One antenna: made, corrected, replaced or put away by its owner; read by others. */
 export function AntennaPage() {

@@ -1,4 +1,5 @@
 import { receiverSchema, type Receiver } from '@harkmoor/sync-model/records/receiver';
+import { plainReceiver } from '@harkmoor/sync-model/records/gear-defaults';
 import { useParams } from 'react-router-dom';
 import { ChoiceChips } from '../../design/choice/ChoiceChips';
 import { NumberField } from '../../design/form/NumberField';
@@ -22,22 +23,8 @@ const METERS = (['s', 'dbm', 'none'] as const).map((kind) => ({
   label: METER_KIND_WORDS[kind],
 }));
 
-const NEW_RECEIVER: Receiver = {
-  deleted: false,
-  importId: null,
-  name: '',
-  ranges: [{ lowHz: 150_000, highHz: 30_000_000 }],
-  meterScale: { kind: 's', s9Dbm: -73, dbPerS: 6, calibrated: false },
-  ifHz: null,
-  bandwidthsHz: null,
-  supplyMa: null,
-  batteryMah: null,
-  dialStepHz: null,
-  sharedUse: false,
-  replaces: null,
-  notes: null,
-  retiredAt: null,
-};
+/** What most portable sets cover; corrected in the form. */
+const NEW_RECEIVER: Receiver = { ...plainReceiver(''), ranges: [{ lowHz: 150_000, highHz: 30_000_000 }] };
 
 /** One receiver: made, corrected, replaced or put away by its owner; read by others. */
 export function ReceiverPage() {

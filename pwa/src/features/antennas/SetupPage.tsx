@@ -1,4 +1,5 @@
 import { setupSchema, type Setup } from '@harkmoor/sync-model/records/setup';
+import { plainSetup } from '@harkmoor/sync-model/records/gear-defaults';
 import { useParams } from 'react-router-dom';
 import { ButtonLink } from '../../design/button/ButtonLink';
 import { NumberField } from '../../design/form/NumberField';
@@ -17,17 +18,6 @@ import { NoSuchGear } from './NoSuchGear';
 import { useGearForm } from './use-gear-form';
 
 const BACK = { to: paths.antennas(), label: 'Antennas' };
-
-const newSetup = (receiverId: string, antennaId: string): Setup => ({
-  deleted: false,
-  importId: null,
-  receiverId,
-  antennaId,
-  coupling: null,
-  attenuationDb: 0,
-  preampDb: 0,
-  retiredAt: null,
-});
 
 /** One setup: a receiver with an antenna, and what stands between them. */
 export function SetupPage() {
@@ -52,7 +42,7 @@ export function SetupPage() {
           key={id}
           gear={gear}
           id={row?.setup.id ?? null}
-          initial={row?.setup.fields ?? newSetup(receiver!.id, antenna!.id)}
+          initial={row?.setup.fields ?? plainSetup(receiver!.id, antenna!.id)}
         />
       ) : (
         <EmptyState
