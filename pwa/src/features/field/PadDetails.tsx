@@ -1,14 +1,12 @@
-import { useState, type ReactNode } from 'react';
+import { useState } from 'react';
 import type { Reception } from '@harkmoor/sync-model/records/reception';
 import { Button } from '../../design/button/Button';
 import { ChoiceChips } from '../../design/choice/ChoiceChips';
-import { TextField } from '../../design/form/TextField';
 import type { SetupChoice } from './data/gear';
 import { FrequencyMend } from './ui/FrequencyMend';
 import { ModeChips } from './ui/ModeChips';
 import { OutcomeChoice } from './ui/OutcomeChoice';
-import { ProgrammeField } from './ui/ProgrammeField';
-import { RstKeys } from './ui/RstKeys';
+import { PadPart, type PartName } from './ui/PadPart';
 import { TimeMend } from './ui/TimeMend';
 import type { PadForm } from './use-pad-form';
 
@@ -20,96 +18,17 @@ type PadDetailsProps = {
   readonly onBin?: () => void;
 };
 
-type Part = 'station' | 'remark' | 'programme' | 'rst';
-const IDENTITIES = [
-  { value: 'sure', label: 'Sure' },
-  { value: 'tentative', label: 'Tentative' },
-  { value: 'unknown', label: 'Unknown' },
-] as const;
 const RST_MODES: readonly Reception['tuning']['mode'][] = ['CW', 'USB', 'LSB', 'DSB', 'FM'];
 
 /** Mode and time, and what is opened when it is wanted: station, programme details, remark, RST. */
 export function PadDetails({ form, base, setups, onBin }: PadDetailsProps) {
   const { values, change } = form;
-  const isHeard = values.outcome === 'heard';
-  const [open, setOpen] = useState<ReadonlySet<Part>>(() => filledParts(values));
-  const toggle = (part: Part): void =>
-    setOpen((parts) => {
-      const next = new Set(parts);
-      if (!next.delete(part)) next.add(part);
-      return next;
-    });
-  const offersRst = isHeard && (RST_MODES.includes(values.mode) || open.has('rst'));
-  const parts: [Part, string, boolean][] = [
-    ['remark', 'Remark', true],
-    ['programme', 'Programme', isHeard],
-    ['station', 'Station', isHeard],
-    ['rst', 'RST', offersRst],
-  ];
-  const taken = setups.filter(({ id, isRetired }) => !isRetired || id === values.setupId);
   return (
     <>
       <ModeChips mode={values.mode} onMode={(mode) => change({ mode })} />
-      <div className="fd-parts">
-        {parts.map(([part, label, isOffered]) =>
-          isOffered ? (
-            <button
-              key={part}
-              type="button"
-              className="fd-part"
-              aria-expanded={open.has(part)}
-              onClick={() => toggle(part)}
-            >
-              {label} {open.has(part) ? '−' : '+'}
-            </button>
-          ) : null,
-        )}
-      </div>
-      <Opened when={open.has('remark')}>
-        <TextField
-          label="Remark"
-          lines={3}
-          maxLength={4000}
-          value={values.remarks}
-          onChange={(remarks) => change({ remarks })}
-        />
-      </Opened>
-      <Opened when={isHeard && open.has('programme')}>
-        <ProgrammeField form={form} />
-      </Opened>
-      <Opened when={isHeard && open.has('station')}>
-        <TextField
-          label="Station heard"
-          maxLength={80}
-          value={values.stationName}
-          onChange={(stationName) => change({ stationName })}
-        />
-        <ChoiceChips
-          label="How sure is it?"
-          options={IDENTITIES}
-          value={values.identity}
-          onChange={(identity) => identity !== null && change({ identity })}
-        />
-      </Opened>
-      <Opened when={offersRst && open.has('rst')}>
-        <RstKeys
-          rst={values.scores.rst ?? null}
-          hasTone={values.mode === 'CW'}
-          onRst={(rst) => form.changeScores({ rst })}
-        />
-      </Opened>
+      <Parts form={form} />
       <TimeMend atMs={values.atMs} tappedMs={base.deviceAt} onTime={(atMs) => change({ atMs })} />
-      {values.isEdit ? (
-        <FrequencyMend dialHz={values.dialHz} onFrequency={(dialHz) => change({ dialHz })} />
-      ) : null}
-      {values.isEdit && taken.length > 1 ? (
-        <ChoiceChips
-          label="Setup"
-          options={taken.map(({ id, label }) => ({ value: id, label }))}
-          value={values.setupId}
-          onChange={(setupId) => setupId !== null && change({ setupId })}
-        />
-      ) : null}
+      {values.isEdit ? <StoredParts form={form} setups={setups} /> : null}
       {values.isEdit ? null : <OutcomeChoice form={form} basis={base.basis} />}
       {onBin ? (
         <Button look="danger" onClick={onBin}>
@@ -120,12 +39,65 @@ export function PadDetails({ form, base, setups, onBin }: PadDetailsProps) {
   );
 }
 
-function Opened({ when, children }: { readonly when: boolean; readonly children: ReactNode }) {
-  return when ? children : null;
+function Parts({ form }: { readonly form: PadForm }) {
+  const { values } = form;
+  const [open, setOpen] = useState<ReadonlySet<PartName>>(() => filledParts(values));
+  const isHeard = values.outcome === 'heard';
+  const offersRst = isHeard && (RST_MODES.includes(values.mode) || open.has('rst'));
+  const parts: [PartName, string, boolean][] = [
+    ['remark', 'Remark', true],
+    ['programme', 'Programme', isHeard],
+    ['station', 'Station', isHeard],
+    ['rst', 'RST', offersRst],
+  ];
+  const offered = parts.filter(([, , isOffered]) => isOffered);
+  const toggle = (part: PartName): void =>
+    setOpen((known) => {
+      const next = new Set(known);
+      if (!next.delete(part)) next.add(part);
+      return next;
+    });
+  return (
+    <>
+      <div className="fd-parts">
+        {offered.map(([part, label]) => (
+          <button
+            key={part}
+            type="button"
+            className="fd-part"
+            aria-expanded={open.has(part)}
+            onClick={() => toggle(part)}
+          >
+            {label} {open.has(part) ? '−' : '+'}
+          </button>
+        ))}
+      </div>
+      {offered.map(([part]) => (open.has(part) ? <PadPart key={part} part={part} form={form} /> : null))}
+    </>
+  );
 }
 
-function filledParts(values: PadForm['values']): Set<Part> {
-  const parts = new Set<Part>();
+/** What only a stored entry may need put right: its dial and its setup. */
+function StoredParts({ form, setups }: Pick<PadDetailsProps, 'form' | 'setups'>) {
+  const { values, change } = form;
+  const offered = setups.filter(({ id, isRetired }) => !isRetired || id === values.setupId);
+  return (
+    <>
+      <FrequencyMend dialHz={values.dialHz} onFrequency={(dialHz) => change({ dialHz })} />
+      {offered.length > 1 ? (
+        <ChoiceChips
+          label="Setup"
+          options={offered.map(({ id, label }) => ({ value: id, label }))}
+          value={values.setupId}
+          onChange={(setupId) => setupId !== null && change({ setupId })}
+        />
+      ) : null}
+    </>
+  );
+}
+
+function filledParts(values: PadForm['values']): Set<PartName> {
+  const parts = new Set<PartName>();
   if (values.remarks) parts.add('remark');
   if (values.programme.length > 0 || values.programmeText) parts.add('programme');
   if (values.stationName || values.identity === 'tentative') parts.add('station');

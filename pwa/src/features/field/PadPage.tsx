@@ -20,15 +20,15 @@ export function PadPage() {
     if (isSaved) goToField();
   }, [isSaved, goToField]);
   if (start?.kind === 'ready') return <PadScreen key={search} start={start} />;
+  // no frame before it is known which: the outlet takes each new frame for a page that was just opened
+  if (start?.kind !== 'gone') return null;
   return (
     <PageFrame title="Score pad" back={{ to: paths.field(), label: 'Field' }}>
-      {start?.kind === 'gone' ? (
-        <EmptyState
-          title="Nothing to score here"
-          sentence={start.sentence}
-          action={<ButtonLink to={paths.field()}>To Field</ButtonLink>}
-        />
-      ) : null}
+      <EmptyState
+        title="Nothing to score here"
+        sentence={start.sentence}
+        action={<ButtonLink to={paths.field()}>To Field</ButtonLink>}
+      />
     </PageFrame>
   );
 }

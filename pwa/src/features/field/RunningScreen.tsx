@@ -1,23 +1,22 @@
 import { useEffect, useState } from 'react';
-import { PageFrame } from '../../design/page/PageFrame';
+import { useHand } from '../../platform/hand';
 import { holdWakeLock } from '../../platform/wake-lock';
 import { useFieldActions } from './data/use-field-actions';
 import { FieldFootParts } from './FieldFootParts';
 import { RoundPart } from './RoundPart';
+import { SetupSheetOf } from './SetupSheetOf';
+import { CautionLine } from './ui/Cautions';
 import { ClockRow } from './ui/ClockRow';
 import { ClockSheet } from './ui/ClockSheet';
-import { Cautions } from './ui/Cautions';
 import { EndSheet } from './ui/EndSheet';
+import { InFoot } from './ui/FieldFrame';
 import { ForgottenPanel } from './ui/ForgottenPanel';
 import { SiteLine } from './ui/OutingHead';
 import { RainLock, useRainLock } from './ui/RainLock';
-import { SetupSheetOf } from './SetupSheetOf';
 import { useAct } from './use-act';
 import { useClockWatch } from './use-clock-watch';
 import { useNextRowInView } from './use-next-row-in-view';
 import type { RunningField } from './use-running-field';
-import { useHand } from '../../platform/hand';
-import './ui/field.css';
 
 type RunningScreenProps = {
   readonly field: RunningField;
@@ -27,7 +26,7 @@ type RunningScreenProps = {
 
 /** A running outing: clock and sun, the round, and what the thumb needs below it. */
 export function RunningScreen({ field, areRowsStill, touchRows }: RunningScreenProps) {
-  const { outing, frame, minuteMs, entries } = field;
+  const { outing, frame, minuteMs } = field;
   const actions = useFieldActions();
   const act = useAct();
   const hand = useHand();
@@ -41,42 +40,40 @@ export function RunningScreen({ field, areRowsStill, touchRows }: RunningScreenP
   useEffect(holdWakeLock, []);
   useClockWatch((step) => void act(() => actions.noteClockStep(outing, step)));
   useNextRowInView(areRowsStill);
-
   return (
-    <PageFrame
-      title="Field"
-      hideTitle
-      foot={<FieldFootParts field={field} hand={hand} onSetups={() => setSheet('setups')} />}
-    >
-      <div className="fd" data-hand={hand}>
-        <ClockRow
-          trust={field.trust}
-          minuteMs={minuteMs}
-          position={frame.position}
-          onCheck={() => setSheet('clock')}
-        />
-        <SiteLine field={field} onLock={rain.lock} />
-        {field.forgottenAt === null ? null : (
-          <ForgottenPanel endedAt={field.forgottenAt} nowMs={minuteMs} onEnd={(at) => end(at, 'gap')} />
-        )}
-        {field.memory.cautionsRead ? null : (
-          <Cautions onDismiss={() => void act(() => actions.readCautions(outing.id))} />
-        )}
-        <RoundPart field={field} touchRows={touchRows} onEnd={() => setSheet('end')} />
-      </div>
+    <div className="fd" data-hand={hand}>
+      <ClockRow
+        trust={field.trust}
+        minuteMs={minuteMs}
+        position={frame.position}
+        onCheck={() => setSheet('clock')}
+      />
+      <SiteLine field={field} onLock={rain.lock} />
+      {field.forgottenAt === null ? null : (
+        <ForgottenPanel endedAt={field.forgottenAt} nowMs={minuteMs} onEnd={(at) => end(at, 'gap')} />
+      )}
+      {field.memory.cautionsRead ? null : (
+        <CautionLine onRead={() => void act(() => actions.readCautions(outing.id))} />
+      )}
+      <RoundPart field={field} touchRows={touchRows} onEnd={() => setSheet('end')} />
+      <InFoot>
+        <FieldFootParts field={field} hand={hand} onSetups={() => setSheet('setups')} />
+      </InFoot>
       {sheet === 'clock' ? <ClockSheet trust={field.trust} nowMs={minuteMs} onClose={close} /> : null}
       {sheet === 'setups' ? <SetupSheetOf field={field} onClose={close} /> : null}
       {sheet === 'end' ? (
         <EndSheet
-          lastEntryAt={
-            entries.length === 0 ? null : Math.max(...entries.map(({ fields }) => fields.deviceAt))
-          }
+          lastEntryAt={lastEntryAt(field)}
           nowMs={minuteMs}
           onEnd={(at) => end(at, 'hand')}
           onClose={close}
         />
       ) : null}
       {rain.isLocked ? <RainLock onOpen={rain.unlock} /> : null}
-    </PageFrame>
+    </div>
   );
+}
+
+function lastEntryAt({ entries }: RunningField): number | null {
+  return entries.length === 0 ? null : Math.max(...entries.map(({ fields }) => fields.deviceAt));
 }

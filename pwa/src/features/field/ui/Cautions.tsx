@@ -1,9 +1,36 @@
+import { useState } from 'react';
+import { Button } from '../../../design/button/Button';
 import { Caution } from '../../../design/states/Caution';
 
-/** The reminders at the start of an outing; local codes and licensed practice come first. */
-export function Cautions({ onDismiss }: { readonly onDismiss?: () => void }) {
+/** The reminders before an outing; local codes and licensed practice come first. */
+export function Cautions() {
+  const [isRead, setRead] = useState(false);
+  if (isRead) return null;
   return (
-    <Caution title="Before you set up" onDismiss={onDismiss}>
+    <Caution title="Before you set up" onDismiss={() => setRead(true)}>
+      <CautionWords />
+    </Caution>
+  );
+}
+
+/** The same in a running outing, folded into one line, until it is put away for this outing. */
+export function CautionLine({ onRead }: { readonly onRead: () => void }) {
+  return (
+    <details className="fd-caution">
+      <summary>
+        <b aria-hidden="true">△</b> Before you set up: cautions
+      </summary>
+      <CautionWords />
+      <Button look="outline" onClick={onRead}>
+        Understood
+      </Button>
+    </details>
+  );
+}
+
+function CautionWords() {
+  return (
+    <>
       <ul>
         <li>Keep wires and masts well away from power lines.</li>
         <li>Thunder near: stop, and disconnect the antenna.</li>
@@ -15,6 +42,6 @@ export function Cautions({ onDismiss }: { readonly onDismiss?: () => void }) {
         Listening to some transmissions, or passing them on, is restricted in many countries: follow local law
         and licence terms. Reminders only; not for safety-of-life use.
       </p>
-    </Caution>
+    </>
   );
 }

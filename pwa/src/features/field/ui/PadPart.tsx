@@ -1,0 +1,57 @@
+import { ChoiceChips } from '../../../design/choice/ChoiceChips';
+import { TextField } from '../../../design/form/TextField';
+import type { PadForm } from '../use-pad-form';
+import { ProgrammeField } from './ProgrammeField';
+import { RstKeys } from './RstKeys';
+
+export type PartName = 'station' | 'remark' | 'programme' | 'rst';
+
+const IDENTITIES = [
+  { value: 'sure', label: 'Sure' },
+  { value: 'tentative', label: 'Tentative' },
+  { value: 'unknown', label: 'Unknown' },
+] as const;
+
+/** One part of an entry that is opened when it is wanted. */
+export function PadPart({ part, form }: { readonly part: PartName; readonly form: PadForm }) {
+  const { values, change } = form;
+  switch (part) {
+    case 'remark':
+      return (
+        <TextField
+          label="Remark"
+          lines={3}
+          maxLength={4000}
+          value={values.remarks}
+          onChange={(remarks) => change({ remarks })}
+        />
+      );
+    case 'programme':
+      return <ProgrammeField form={form} />;
+    case 'station':
+      return (
+        <>
+          <TextField
+            label="Station heard"
+            maxLength={80}
+            value={values.stationName}
+            onChange={(stationName) => change({ stationName })}
+          />
+          <ChoiceChips
+            label="How sure is it?"
+            options={IDENTITIES}
+            value={values.identity}
+            onChange={(identity) => identity !== null && change({ identity })}
+          />
+        </>
+      );
+    case 'rst':
+      return (
+        <RstKeys
+          rst={values.scores.rst ?? null}
+          hasTone={values.mode === 'CW'}
+          onRst={(rst) => form.changeScores({ rst })}
+        />
+      );
+  }
+}
