@@ -14,13 +14,17 @@ const isNfc = (text: string) => text === text.normalize('NFC');
 // eslint-disable-next-line no-control-regex -- control characters are what is refused here
 const hasControlCharacters = (text: string) => /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f]/.test(text);
 
-/** Text for people: composed (NFC) and without control characters other than tab and line ends. */
+/** Half of a character outside the basic plane, as a cut through an emoji leaves it: no database stores it. */
+const hasHalfCharacters = (text: string) => /\p{Surrogate}/u.test(text);
+
+/** Text for people: whole characters, composed (NFC), without control characters other than tab and line ends. */
 export function textSchema(lengthMax: number) {
   return z
     .string()
     .max(lengthMax)
     .refine(isNfc, 'must be composed text (NFC)')
-    .refine((text) => !hasControlCharacters(text), 'must not hold control characters');
+    .refine((text) => !hasControlCharacters(text), 'must not hold control characters')
+    .refine((text) => !hasHalfCharacters(text), 'must not hold half a character');
 }
 
 export const nameSchema = textSchema(60).refine((text) => text.trim().length > 0, 'must not be empty');
