@@ -11,7 +11,8 @@ export function createDexieStore(database: HarkmoorDatabase): Store {
   const tables = [...ALL_TYPES.map((type) => database.recordTable(type)), database.clubs, database.settings];
   const tx = createTransaction(database);
   return {
-    transaction: (work) => database.transaction('rw', tables, () => work(tx)),
+    // the scope must be an async function itself: Dexie follows native awaits only in one that it sees as such
+    transaction: (work) => database.transaction('rw', tables, async () => work(tx)),
   };
 }
 
