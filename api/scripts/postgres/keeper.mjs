@@ -25,6 +25,7 @@ try {
   if (process.connected) process.send({ port });
   else await stop();
 } catch (error) {
+  removeThrowAway();
   if (process.connected) process.send({ failure: error.message }, () => process.exit(1));
   else process.exit(1);
 }
@@ -122,8 +123,12 @@ async function stop() {
     process.kill(pid, signal);
     if (await until(() => serverLines() === null && hasEnded(ownServer), limitMs, 30)) break;
   }
-  for (const place of task.remove) fs.rmSync(place, { recursive: true, force: true });
+  removeThrowAway();
   process.exit(0);
+}
+
+function removeThrowAway() {
+  for (const place of task.remove) fs.rmSync(place, { recursive: true, force: true });
 }
 
 function rotateLog() {
