@@ -95,7 +95,7 @@ function changing(
   const mine = held.filter((record) => mayEdit(phone, record, held));
   const wanted = mine.filter(({ type }) => fits(kind, type));
   if (wanted.length === 0) return null;
-  const record = random.chance(0.5) ? wanted[0]! : random.pick(wanted);
+  const record = random.chance(0.7) ? oldestOf(random.pick(wanted).type, wanted) : random.pick(wanted);
   const refused = wanted.find(({ debt }) => debt?.code === 'invalid');
   if (refused && random.chance(0.5)) return mending(refused, novelty);
   const patch = patchOf(kind, record, held, random, novelty);
@@ -103,6 +103,13 @@ function changing(
     const now = await read(tx, record);
     if (now) await tx.putRecords([edit(now, patch)]);
   };
+}
+
+/** Most edits go to the oldest record of a type, so that the phones meet there. */
+function oldestOf(type: string, records: readonly StoredRecord[]): StoredRecord {
+  return records
+    .filter((record) => record.type === type)
+    .reduce((first, one) => (one.id < first.id ? one : first));
 }
 
 /** A person gives a refused site a name that the server takes. */

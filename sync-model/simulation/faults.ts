@@ -1,5 +1,3 @@
-import type { DevicePorts, Store } from '../src/device/ports.js';
-import type { HubStore } from '../src/hub/ports.js';
 import type { FateWeights } from './network.js';
 import type { Random } from './random.js';
 
@@ -59,11 +57,3 @@ export function weatherFrom(random: Random): Weather {
 export function skewFrom(random: Random): number {
   return random.pick(SKEWS_MS);
 }
-
-/** A fault planted by hand between the real code and its ports; the simulation must find it. */
-export type PlantedFault = {
-  readonly name: string;
-  readonly wrapStore?: (store: Store) => Store;
-  readonly wrapPorts?: (ports: DevicePorts) => DevicePorts;
-  readonly wrapHub?: (hub: HubStore) => HubStore;
-};

@@ -4,11 +4,12 @@ import type { RoundLimits } from '../src/protocol/limits.js';
 import type { SyncRequest } from '../src/protocol/messages.js';
 import { chooseAct, noveltyOf, type Novelty } from './acts.js';
 import { emptyDisk, type CommitWatcher } from './disk.js';
-import { GOOD_WEATHER, skewFrom, weatherFrom, type PlantedFault, type Weather } from './faults.js';
+import { GOOD_WEATHER, skewFrom, weatherFrom, type Weather } from './faults.js';
 import { checkConverged, checkCursors, checkNothingReferredDeleted, checkSave } from './invariants.js';
 import { MemoryHub } from './memory-hub.js';
 import { createNetwork, type Network } from './network.js';
 import { checkReadsOwnWrites, Oracle, type Violation } from './oracle.js';
+import type { PlantedFault } from './planted-faults.js';
 import { BO, CLUB, idOf, PHONES, startClubs } from './people.js';
 import { Phone } from './phone.js';
 import { randomFrom, type Random } from './random.js';
@@ -23,10 +24,9 @@ export type RunResult = {
   readonly steps: number;
 };
 
-/** Small limits, so that rounds, transactions and pages are cut. */
-const LIMITS: RoundLimits = { changesPerRound: 3, changesPerTransaction: 2, recordsPerPage: 5 };
-const ROUNDS_TO_QUIET_MAX = 40;
-const STEPS_ACTIVE = 450;
+/** With one change a round and two records a page, a good hundred records need this many. */
+const ROUNDS_TO_QUIET_MAX = 80;
+const STEPS_ACTIVE = 330;
 /** Against a standstill: far more than any run needs. */
 const TURNS_MAX = 10_000;
 const STEPS_TO_REST_MAX = 50_000;
@@ -49,6 +49,8 @@ class Fleet {
   private readonly network: Network;
   private readonly phones: Phone[];
   private weather: Weather;
+  /** Small, so that rounds, transactions and pages are cut. */
+  private readonly limits: RoundLimits;
   private simMs = Date.UTC(2026, 5, 1);
   private hubMade = 0x9000_0000;
   private crashHub: () => void = () => {};
@@ -60,6 +62,11 @@ class Fleet {
   ) {
     this.random = randomFrom(seed);
     this.weather = weatherFrom(this.random);
+    this.limits = {
+      changesPerRound: 1 + this.random.below(5),
+      changesPerTransaction: 2,
+      recordsPerPage: 2 + this.random.below(6),
+    };
     this.scheduler = new Scheduler(this.random);
     this.hub = new MemoryHub(
       this.scheduler,
@@ -208,7 +215,7 @@ class Fleet {
       nowMs: () => this.simMs,
       newId: () => idOf((this.hubMade += 1)),
     };
-    const answer = answerRound(ports, { accountId }, request, LIMITS).catch((error: unknown) => {
+    const answer = answerRound(ports, { accountId }, request, this.limits).catch((error: unknown) => {
       this.report(error);
       return 'crashed' as const;
     });
@@ -233,9 +240,8 @@ class Fleet {
     const phone = new Phone(deviceId, accountId, emptyDisk(onCommit), {
       scheduler: this.scheduler,
       wallMs: () => this.simMs,
-      limits: LIMITS,
+      limits: this.limits,
       linkOf: (account, life) => this.network.linkOf(account, life),
-      wrapStore: this.fault?.wrapStore ?? ((store) => store),
       wrapPorts: this.fault?.wrapPorts ?? ((ports) => ports),
     });
     phone.skewMs = this.weather.skewsMs[index]!;

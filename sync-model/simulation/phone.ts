@@ -1,6 +1,6 @@
 import { CLOCK_OFFSET_SETTING } from '../src/device/clock-offset.js';
 import { editedRecord, newRecord } from '../src/device/local-edit.js';
-import type { DevicePorts, Link, RecordKey, Store, StoreTransaction } from '../src/device/ports.js';
+import type { DevicePorts, Link, RecordKey, StoreTransaction } from '../src/device/ports.js';
 import type { StoredRecord } from '../src/device/stored-record.js';
 import { createSyncEngine, type RoundOutcome, type SyncEngine } from '../src/device/sync-round.js';
 import type { RoundLimits } from '../src/protocol/limits.js';
@@ -26,7 +26,6 @@ export type PhoneWorld = {
   readonly wallMs: () => number;
   readonly limits: RoundLimits;
   readonly linkOf: (accountId: string, life: () => Life) => Link;
-  readonly wrapStore: (store: Store) => Store;
   readonly wrapPorts: (ports: DevicePorts) => DevicePorts;
 };
 
@@ -116,7 +115,7 @@ export class Phone {
       nowMs: () => this.nowMs() + this.offsetMs,
     });
     const ports: DevicePorts = {
-      store: world.wrapStore(this.stores.for('engine')),
+      store: this.stores.for('engine'),
       link: world.linkOf(this.accountId, () => life),
       clock: { deviceNowMs: () => this.nowMs() },
       lock: { exclusively: (work) => work() },
