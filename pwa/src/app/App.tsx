@@ -1,11 +1,9 @@
-import { IonApp, IonRouterOutlet, IonTabs, setupIonicReact } from '@ionic/react';
+import { IonApp, IonRouterOutlet, setupIonicReact } from '@ionic/react';
 import { IonReactRouter } from '@ionic/react-router';
 import { Providers } from './Providers';
 import { ROUTES } from './routes';
-import { SideRail } from './SideRail';
-import { PhoneTabs } from './PhoneTabs';
+import { Shell } from './Shell';
 import { RedFilter } from './RedFilter';
-import { UpdateLine } from './updates/UpdateLine';
 import './shell.css';
 
 setupIonicReact({
@@ -22,16 +20,9 @@ export function App() {
       <IonApp>
         <RedFilter />
         <IonReactRouter>
-          <div className="shell">
-            <SideRail />
-            <div className="shell-main">
-              <IonTabs>
-                <IonRouterOutlet animated={false}>{ROUTES}</IonRouterOutlet>
-                {PhoneTabs()}
-              </IonTabs>
-              <UpdateLine />
-            </div>
-          </div>
+          <Shell>
+            <IonRouterOutlet animated={false}>{ROUTES}</IonRouterOutlet>
+          </Shell>
         </IonReactRouter>
       </IonApp>
     </Providers>

@@ -9,7 +9,7 @@ export function SideRail() {
   const here = sectionOf(useLocation().pathname);
   const mayUseDesk = useMayUseDesk();
   return (
-    <div className="rail">
+    <aside className="rail" aria-label="Harkmoor">
       <div className="rail-name">Harkmoor</div>
       <nav aria-label="Sections">
         {SECTIONS.map((section) => (
@@ -29,7 +29,7 @@ export function SideRail() {
           <AccountBadge />
         </div>
       </div>
-    </div>
+    </aside>
   );
 }
 
