@@ -1,11 +1,6 @@
 import { Migration } from '@mikro-orm/migrations';
-import {
-  INSTANT_NOT_NULL,
-  RECORD_COLUMNS,
-  RECORD_KEYS,
-  STAMP,
-  TABLES,
-} from './logbook-tables-20261201110000.js';
+import { INSTANT_NOT_NULL, STAMP } from './logbook-columns-20261201110000.js';
+import { RECORD_COLUMNS, RECORD_KEYS, TABLES } from './logbook-tables-20261201110000.js';
 
 /** Asked when something is deleted: does anything refer to it? */
 const PARENT_INDEXES = [

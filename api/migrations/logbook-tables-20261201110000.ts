@@ -1,24 +1,19 @@
 /** The tables as this migration makes them; later changes are later migrations. */
-
-const FREQUENCY = 'between 1000 and 3000000000';
-const INSTANT = 'between 631152000000 and 4102444800000';
-const MODES = "in ('AM', 'SAM', 'USB', 'LSB', 'DSB', 'CW', 'FM', 'digital', 'other')";
-const OBJECT = (column: string) => `jsonb not null check (jsonb_typeof(${column}) = 'object')`;
-const OBJECT_OR_NULL = (column: string) => `jsonb check (jsonb_typeof(${column}) = 'object')`;
-const LIST = (column: string) => `jsonb not null check (jsonb_typeof(${column}) = 'array')`;
-const INSTANT_OR_NULL = (column: string) => `${column} bigint check (${column} ${INSTANT})`;
-export const INSTANT_NOT_NULL = (column: string) => `${column} bigint not null check (${column} ${INSTANT})`;
-const FREQUENCY_NOT_NULL = (column: string) => `${column} bigint not null check (${column} ${FREQUENCY})`;
-/** Within a number column's limits; null passes. */
-const RANGED = (column: string, type: string, low: number, high: number) =>
-  `${column} ${type} check (${column} between ${low} and ${high})`;
-const NOT_NULL_RANGED = (column: string, type: string, low: number, high: number) =>
-  `${column} ${type} not null check (${column} between ${low} and ${high})`;
-const PARENT = (column: string, table: string) =>
-  `foreign key (club_id, ${column}) references ${table} (club_id, id)`;
-const CLUB = 'foreign key (club_id) references club';
-export const STAMP = (column: string) =>
-  `${column} text collate "C" not null check (${column} ~ '^[0-9a-f]{16}[0-9a-z]{8}$')`;
+import {
+  CLUB,
+  FREQUENCY,
+  FREQUENCY_NOT_NULL,
+  INSTANT_NOT_NULL,
+  INSTANT_OR_NULL,
+  LIST,
+  MODES,
+  NOT_NULL_RANGED,
+  OBJECT,
+  OBJECT_OR_NULL,
+  PARENT,
+  RANGED,
+  STAMP,
+} from './logbook-columns-20261201110000.js';
 
 /**
  * Every key of club data begins with club_id, foreign keys included. Tables without a parent that a row always

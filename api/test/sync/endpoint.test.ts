@@ -192,35 +192,6 @@ describe('the sync endpoint', () => {
   });
 });
 
-describe('the history of a record', () => {
-  it('should be shown to members alone', async () => {
-    const record = antenna();
-    await round(owner, [record]);
-    await round(owner, [edit(record, { notes: 'Bent.' }, stampAt(EVENING_MS + 9))]);
-    const path = `/api/clubs/${clubId}/records/antenna/${record.id}/history`;
-    const { status, body } = await other.visitor.get(path);
-    expect(status).toBe(200);
-    expect(body).toEqual({
-      rows: [
-        {
-          id: expect.any(String) as string,
-          field: 'notes',
-          replaced: { value: null, stamp: record.at },
-          kept: { value: 'Bent.', stamp: stampAt(EVENING_MS + 9) },
-          byId: owner.accountId,
-          clash: false,
-          at: expect.any(Number) as number,
-        },
-      ],
-    });
-    const stranger = await makePerson(server, mail, 'Kit Lyng');
-    const refused = await stranger.visitor.get(path);
-    const unknown = await stranger.visitor.get(`/api/clubs/${v7()}/records/antenna/${record.id}/history`);
-    expect([refused.status, refused.body.code]).toEqual([404, 'not-found']);
-    expect({ ...unknown.body, requestId: '' }).toEqual({ ...refused.body, requestId: '' });
-  });
-});
-
 /** For tables of cases, which are made before the club is. */
 function clubIdOf(): string {
   return v7();

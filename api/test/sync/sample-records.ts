@@ -6,7 +6,7 @@ import { EVENING_MS, stampAt } from './hub.js';
 type Fields = Record<string, unknown>;
 const AT = EVENING_MS;
 
-/** A whole record as a phone first sends it; empty fields are left out. */
+/** A whole record as a phone first sends it: empty fields are left out. */
 export function newRecord(type: WritableType, fields: Fields, at = stampAt(AT), id = v7()): Change {
   return { type, id, at, fields: { deleted: false, ...fields } };
 }
@@ -26,15 +26,12 @@ export function sampleOfEachType(): Sample {
     place: { locator: 'JO45fk' },
     environment: 'quiet-rural',
     sharedUse: true,
-    notes: 'Park below the dune; the path is soft.\nNo mains within 2 km – “quiet”.',
+    notes: 'The path is soft.\nNo mains within 2 km – “quiet”.',
     retiredAt: AT,
   });
   const receiver = newRecord('receiver', {
     name: 'Grey portable',
-    ranges: [
-      { lowHz: 150_000, highHz: 30_000_000 },
-      { lowHz: 64_000_000, highHz: 108_000_000 },
-    ],
+    ranges: [{ lowHz: 150_000, highHz: 30_000_000 }],
     meterScale: { kind: 's', s9Dbm: -73, dbPerS: 6, calibrated: false },
     ifHz: [55_845_000, 455_000],
     bandwidthsHz: [2500, 4000, 6000],
