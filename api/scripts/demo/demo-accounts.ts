@@ -18,7 +18,8 @@ export type DemoHome = { readonly accountId: string; readonly clubId: string; re
 export async function ensureDemoAccounts(em: EntityManager, nowMs: number): Promise<Map<string, DemoHome>> {
   const passwordHash = await hashPassword(DEMO_PASSWORD);
   return em.transactional(async (tx) => {
-    const club = (await tx.findOne(Club, { name: DEMO_CLUB_NAME, demo: true })) ?? newDemoClub(tx, nowMs);
+    const club =
+      (await tx.findOne(Club, { name: DEMO_CLUB_NAME, demo: true })) ?? (await newDemoClub(tx, nowMs));
     const homes = new Map<string, DemoHome>();
     for (const { key, email, name, role } of DEMO_PEOPLE) {
       let account = await tx.findOne(Account, { email });
@@ -39,7 +40,8 @@ export async function ensureDemoAccounts(em: EntityManager, nowMs: number): Prom
   });
 }
 
-function newDemoClub(tx: EntityManager, nowMs: number): Club {
+/** Written before its members are: the mapper knows no relation between the two tables. */
+async function newDemoClub(tx: EntityManager, nowMs: number): Promise<Club> {
   const club = new Club({
     id: newId(),
     kind: 'club',
@@ -49,7 +51,7 @@ function newDemoClub(tx: EntityManager, nowMs: number): Club {
     historyId: randomUUID(),
     nowMs,
   });
-  tx.persist(club);
+  await tx.persist(club).flush();
   return club;
 }
 

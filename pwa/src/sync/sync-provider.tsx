@@ -36,8 +36,7 @@ export function SyncProvider({ children }: { children: ReactNode }) {
       channel.close();
       setStatus(IDLE_SENDING);
     };
-    // a new log object over the same database (another club shown) must not restart the sending
-    // eslint-disable-next-line react-hooks/exhaustive-deps
+    // eslint-disable-next-line react-hooks/exhaustive-deps -- another log object over the same database (another club shown) must not restart the sending
   }, [database]);
 
   const handle = useMemo(() => ({ status, sendNow: () => runner.current?.request() }), [status]);
