@@ -27,6 +27,8 @@ export function GradeWords({ figures, touched, hasOutlines }: GradeWordsProps) {
           </b>{' '}
           {SINPO_MEANINGS[touched][grade]}. {hint ?? nextWords(figures)}
         </>
+      ) : Object.keys(figures).length > 0 ? (
+        (hint ?? nextWords(figures))
       ) : hasOutlines ? (
         'The scores of the entry before are outlines. Only what you touch counts.'
       ) : (
@@ -38,7 +40,7 @@ export function GradeWords({ figures, touched, hasOutlines }: GradeWordsProps) {
 
 function nextWords(figures: Figures): string {
   const open = SINPO_LETTERS.find((letter) => figures[letter] === undefined);
-  if (open === undefined) return '';
+  if (open === undefined) return 'All five are given.';
   return open === 'o' ? 'Now the overall score.' : `Now ${SINPO_NAMES[open]}.`;
 }
 

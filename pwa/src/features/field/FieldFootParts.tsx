@@ -1,11 +1,9 @@
 import { useIonRouter } from '@ionic/react';
 import type { Hand } from '../../platform/hand';
 import { buzz } from '../../platform/vibrate';
-import { useOpenDrafts } from './data/pad-drafts';
 import { useFieldActions } from './data/use-field-actions';
 import { padForSameAgain } from './pad-paths';
 import { ActLine } from './ui/ActLine';
-import { DraftLine } from './ui/DraftLine';
 import { FieldFoot } from './ui/FieldFoot';
 import { SetupQuestion } from './ui/SetupQuestion';
 import { useAct } from './use-act';
@@ -17,14 +15,13 @@ type FieldFootPartsProps = {
   readonly onSetups: () => void;
 };
 
-/** The lower part of a running outing: a draft left behind, the setup question, *Undo*, and the keys. */
+/** The lower part of a running outing: the setup question, *Undo*, and the keys. */
 export function FieldFootParts({ field, hand, onSetups }: FieldFootPartsProps) {
   const { outing, roundNo, round, frame, sameAgain } = field;
   const { currentSetupId } = outing.fields;
   const router = useIonRouter();
   const actions = useFieldActions();
   const act = useAct();
-  const draft = useOpenDrafts()?.[0];
   const current = frame.setups.find(({ id }) => id === currentSetupId);
   const now = () => ({ atMs: Date.now(), roundNo });
   const again = (): void => {
@@ -38,13 +35,6 @@ export function FieldFootParts({ field, hand, onSetups }: FieldFootPartsProps) {
   };
   const lines = (
     <>
-      {draft ? (
-        <DraftLine
-          draft={draft}
-          onContinue={() => router.push(draft.values.path)}
-          onDrop={() => void act(() => actions.dropDraft(draft.values.receptionId))}
-        />
-      ) : null}
       {field.isSetupQuestionDue && current ? (
         <SetupQuestion
           label={current.label}

@@ -1,17 +1,34 @@
 import { useEffect, useMemo, useState } from 'react';
+import { useIonViewDidLeave, useIonViewWillEnter } from '@ionic/react';
 import { useLocation } from 'react-router-dom';
 import { ButtonLink } from '../../design/button/ButtonLink';
-import { PageFrame } from '../../design/page/PageFrame';
 import { EmptyState } from '../../design/states/EmptyState';
 import { PATTERNS, paths } from '../../platform/paths';
 import { usePadStart } from './data/use-pad-log';
 import { padAddress } from './pad-address';
 import { PadScreen } from './PadScreen';
+import { FieldFrame } from './ui/FieldFrame';
 import { useGoToField } from './use-go-to-field';
 
-/** The score pad: opened by *Heard*, by *Same again*, or to edit an entry. */
+/**
+ * The score pad: opened by *Heard*, by *Same again*, or to edit an entry. The outlet keeps a page alive after it
+ * was left, so what is on it is put away at each leaving: a draft is then kept or dropped at once, and read again
+ * at a return.
+ */
 export function PadPage() {
   const search = useOwnSearch();
+  const [title, setTitle] = useState('Score pad');
+  const [isShown, setShown] = useState(true);
+  useIonViewWillEnter(() => setShown(true));
+  useIonViewDidLeave(() => setShown(false));
+  return (
+    <FieldFrame title={title} back={{ to: paths.field(), label: 'Field' }}>
+      {isShown ? <Pad key={search} search={search} onTitle={setTitle} /> : null}
+    </FieldFrame>
+  );
+}
+
+function Pad({ search, onTitle }: { readonly search: string; readonly onTitle: (title: string) => void }) {
   const address = useMemo(() => padAddress(search), [search]);
   const start = usePadStart(address);
   const goToField = useGoToField();
@@ -19,17 +36,14 @@ export function PadPage() {
   useEffect(() => {
     if (isSaved) goToField();
   }, [isSaved, goToField]);
-  if (start?.kind === 'ready') return <PadScreen key={search} start={start} />;
-  // no frame before it is known which: the outlet takes each new frame for a page that was just opened
+  if (start?.kind === 'ready') return <PadScreen start={start} onTitle={onTitle} />;
   if (start?.kind !== 'gone') return null;
   return (
-    <PageFrame title="Score pad" back={{ to: paths.field(), label: 'Field' }}>
-      <EmptyState
-        title="Nothing to score here"
-        sentence={start.sentence}
-        action={<ButtonLink to={paths.field()}>To Field</ButtonLink>}
-      />
-    </PageFrame>
+    <EmptyState
+      title="Nothing to score here"
+      sentence={start.sentence}
+      action={<ButtonLink to={paths.field()}>To Field</ButtonLink>}
+    />
   );
 }
 

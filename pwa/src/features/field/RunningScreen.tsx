@@ -5,6 +5,7 @@ import { useFieldActions } from './data/use-field-actions';
 import { FieldFootParts } from './FieldFootParts';
 import { RoundPart } from './RoundPart';
 import { SetupSheetOf } from './SetupSheetOf';
+import { OpenDraft } from './OpenDraft';
 import { CautionLine } from './ui/Cautions';
 import { ClockRow } from './ui/ClockRow';
 import { ClockSheet } from './ui/ClockSheet';
@@ -55,6 +56,7 @@ export function RunningScreen({ field, areRowsStill, touchRows }: RunningScreenP
       {field.memory.cautionsRead ? null : (
         <CautionLine onRead={() => void act(() => actions.readCautions(outing.id))} />
       )}
+      <OpenDraft />
       <RoundPart field={field} touchRows={touchRows} onEnd={() => setSheet('end')} />
       <InFoot>
         <FieldFootParts field={field} hand={hand} onSetups={() => setSheet('setups')} />

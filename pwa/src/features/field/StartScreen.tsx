@@ -1,14 +1,12 @@
-import { useIonRouter } from '@ionic/react';
 import { Button } from '../../design/button/Button';
 import { ButtonLink } from '../../design/button/ButtonLink';
 import { RowLink } from '../../design/layout/RowLink';
 import { paths } from '../../platform/paths';
-import { useOpenDrafts } from './data/pad-drafts';
 import type { StoredOuting } from './data/running-outing';
 import { useFieldActions } from './data/use-field-actions';
+import { OpenDraft } from './OpenDraft';
 import { QuickStartForm } from './QuickStartForm';
 import { Cautions } from './ui/Cautions';
-import { DraftLine } from './ui/DraftLine';
 import { InFoot } from './ui/FieldFrame';
 import { ReadyLine } from './ui/ReadyLine';
 import { useAct } from './use-act';
@@ -34,6 +32,7 @@ function ReadyToStart({ choice }: { readonly choice: StartChoice }) {
   };
   return (
     <div className="fd">
+      <OpenDraft />
       <h2 className="fd-head">{site ? `Out at ${site.name} again?` : 'Where are you listening?'}</h2>
       <p className="fd-see">
         {site ? (
@@ -60,7 +59,6 @@ function ReadyToStart({ choice }: { readonly choice: StartChoice }) {
       </nav>
       <InFoot>
         <div className="fd-start-foot">
-          <Drafts />
           {start ? (
             <Button wide onClick={go}>
               Start the outing
@@ -93,20 +91,5 @@ function ChoiceRows({ choice }: { readonly choice: StartChoice }) {
         note={list ? `Target list · ${list.targetCount} targets` : 'Enter frequencies, or choose a list'}
       />
     </>
-  );
-}
-
-function Drafts() {
-  const router = useIonRouter();
-  const actions = useFieldActions();
-  const act = useAct();
-  const draft = useOpenDrafts()?.[0];
-  if (!draft) return null;
-  return (
-    <DraftLine
-      draft={draft}
-      onContinue={() => router.push(draft.values.path)}
-      onDrop={() => void act(() => actions.dropDraft(draft.values.receptionId))}
-    />
   );
 }

@@ -2,6 +2,8 @@ import { useEffect, useRef, type MouseEvent, type PointerEvent } from 'react';
 
 const LONG_PRESS_MS = 500;
 const MOVE_LIMIT_PX = 12;
+/** A browser sends the click of a release within this time. */
+const CLICK_FOLLOWS_MS = 120;
 
 /**
  * A tap and a long press on one button. Each is told the moment at which the finger came down, ms UTC of the
@@ -23,6 +25,7 @@ export function useLongPress(acts: { onTap: (atMs: number) => void; onLongPress:
       clearTimeout(timer.current);
       timer.current = setTimeout(() => {
         spend();
+        swallowClickOfRelease();
         acts.onLongPress(atMs);
       }, LONG_PRESS_MS);
     },
@@ -44,4 +47,19 @@ export function useLongPress(acts: { onTap: (atMs: number) => void; onLongPress:
       acts.onTap(from?.atMs ?? Date.now());
     },
   };
+}
+
+/** What opened under the finger must not take the click of its release for a tap beside it. */
+function swallowClickOfRelease(): void {
+  const swallow = (event: Event): void => {
+    event.stopPropagation();
+    event.preventDefault();
+  };
+  const releases = ['pointerup', 'pointercancel', 'touchend'] as const;
+  const released = (): void => {
+    for (const release of releases) window.removeEventListener(release, released, true);
+    setTimeout(() => window.removeEventListener('click', swallow, true), CLICK_FOLLOWS_MS);
+  };
+  window.addEventListener('click', swallow, true);
+  for (const release of releases) window.addEventListener(release, released, true);
 }

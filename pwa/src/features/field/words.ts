@@ -73,6 +73,12 @@ export function clockWords(trust: ClockTrust, nowMs: number): { text: string; is
   }
 }
 
+/** How a device stands against true time: "5.1 s fast", "0.7 s slow". `offsetMs`: true − device. */
+export function aheadWords(offsetMs: number): string {
+  if (offsetMs === 0) return 'right';
+  return `${offsetWords(-Math.abs(offsetMs)).slice(1)} ${offsetMs < 0 ? 'fast' : 'slow'}`;
+}
+
 /** What is added to the device's time: "+0.3 s", "−3 min". */
 export function offsetWords(offsetMs: number): string {
   const sign = offsetMs < 0 ? '' : '+';

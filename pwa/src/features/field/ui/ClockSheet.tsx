@@ -7,7 +7,7 @@ import { readServerTime } from '../../../platform/server-time';
 import { utcHourMinute, withUnit } from '../../../platform/utc-text';
 import { useFieldActions } from '../data/use-field-actions';
 import { useAct } from '../use-act';
-import { clockWords, offsetWords } from '../words';
+import { aheadWords, clockWords } from '../words';
 
 type ClockSheetProps = { readonly trust: ClockTrust; readonly nowMs: number; readonly onClose: () => void };
 
@@ -55,8 +55,8 @@ function ToneCheckPart({ onDone }: { readonly onDone: () => void }) {
         <>
           <p className="num" role="status">
             {taps.length === 1 ? '1 tap' : `${taps.length} taps`}: the pip was{' '}
-            {utcHourMinute(nearestMinute(last) + shift * 60_000)} UTC, so true time is the device’s{' '}
-            {offsetWords(check.offsetMs)}, give or take {withUnit(check.uncertaintyMs / 1000, 's', 1)}.
+            {utcHourMinute(nearestMinute(last) + shift * 60_000)} UTC, so this device is{' '}
+            {aheadWords(check.offsetMs)}, give or take {withUnit(check.uncertaintyMs / 1000, 's', 1)}.
           </p>
           <div className="fd-two">
             <Button look="outline" onClick={() => setShift(shift - 1)}>

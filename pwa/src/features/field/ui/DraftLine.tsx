@@ -9,7 +9,7 @@ type DraftLineProps = {
 /** A pad that was left before *Save*: it counts nowhere until it is saved. */
 export function DraftLine({ draft, onContinue, onDrop }: DraftLineProps) {
   return (
-    <div className="hm-notice fd-line" role="group" aria-label="Not saved yet">
+    <div className="hm-notice fd-draft" role="group" aria-label="Not saved yet">
       <span className="hm-notice-text num">Not saved: {draft.values.title}</span>
       <button type="button" onClick={onContinue}>
         Continue
