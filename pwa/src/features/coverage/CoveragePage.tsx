@@ -1,11 +1,17 @@
-import { EmptyState } from '../../design/states/EmptyState';
 import { PageFrame } from '../../design/page/PageFrame';
+import { paths } from '../../platform/paths';
+import { CoverageScreen } from './CoverageScreen';
+import { OverviewGate } from './OverviewGate';
+import { useCoverageView } from './view/use-coverage-view';
 
-/** Coverage. */
+/** What can be heard where: squares on a map, from all receptions on this device. Needs no network. */
 export function CoveragePage() {
+  const [view, change] = useCoverageView(paths.coverage());
   return (
-    <PageFrame title="Coverage">
-      <EmptyState title="Not here yet" sentence="This screen is being built. Nothing can be entered on it." />
+    <PageFrame title="Coverage" hideTitle scrolls={false} wide>
+      <OverviewGate>
+        {(overview) => <CoverageScreen view={view} overview={overview} onChange={change} />}
+      </OverviewGate>
     </PageFrame>
   );
 }
