@@ -11,6 +11,7 @@ import { AccessTokenStrategy } from './access-token.strategy.js';
 import { AccountsController } from './accounts.controller.js';
 import { MailAllowance } from './mail-allowance.js';
 import { MailLinks } from './mail-links.js';
+import { OldRows } from './old-rows.js';
 import { PasswordReset } from './password-reset.js';
 import { Sessions } from './sessions.js';
 import { SessionsController } from './sessions.controller.js';
@@ -42,6 +43,7 @@ import { WhoAmIAnswer } from './who-am-i.js';
     { provide: APP_GUARD, useClass: AccessGuard },
     MailAllowance,
     MailLinks,
+    OldRows,
     PasswordReset,
     Sessions,
     SignUp,

@@ -54,11 +54,12 @@ test('should let a change of role hold at the very next request', async () => {
 test('should keep the last admin, also where two admins step down at once', async () => {
   const last = await setRole(admin, admin, 'member');
   expect([last.status, last.body.code]).toEqual([409, 'last-admin']);
-  await setRole(admin, second, 'admin');
-  await Promise.all([setRole(admin, admin, 'member'), setRole(second, second, 'organizer')]);
-  const { body } = await admin.visitor.get(`/api/clubs/${clubId}/members`);
-  const admins = (body.members as { role: string }[]).filter(({ role }) => role === 'admin');
-  expect(admins).toHaveLength(1);
+  const connection = server.orm.em.getConnection();
+  for (let time = 0; time < 20; time += 1) {
+    await connection.execute(`update membership set role = 'admin' where club_id = ?`, [clubId]);
+    const both = await Promise.all([setRole(admin, admin, 'member'), setRole(second, second, 'organizer')]);
+    expect(both.map(({ status }) => status).sort()).toEqual([200, 409]);
+  }
 });
 
 test('should keep one admin where two admins demote each other at once', async () => {
