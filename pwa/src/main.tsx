@@ -7,12 +7,15 @@ import './design/base.css';
 import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
 import { App } from './app/App';
+import { preloadNext, preloadPage } from './app/pages';
+import { whenIdle } from './platform/idle';
 import { registerWorker } from './app/updates/worker';
 import { followTheme } from './design/theme/theme';
 import { keepInstallOffer } from './platform/install-offer';
 
 const root = document.getElementById('root');
 if (!root) throw new Error('index.html has no #root');
+preloadPage(location.pathname);
 followTheme();
 keepInstallOffer();
 createRoot(root).render(
@@ -23,3 +26,4 @@ createRoot(root).render(
 registerWorker().catch((error: unknown) =>
   console.error('The application is not kept on this device', error),
 );
+whenIdle(preloadNext);

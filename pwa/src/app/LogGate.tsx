@@ -1,6 +1,7 @@
-import { lazy, type ReactNode } from 'react';
+import type { ReactNode } from 'react';
 import { useActiveLogState } from '../store/active-log';
 import type { PATTERNS } from '../platform/paths';
+import { pageOnDemand } from './page-on-demand';
 
 type PageName = keyof typeof PATTERNS;
 
@@ -16,9 +17,7 @@ const WITHOUT_LOG: ReadonlySet<PageName> = new Set([
   'settings',
 ]);
 
-const WelcomePage = lazy(() =>
-  import('../features/account/WelcomePage').then((m) => ({ default: m.WelcomePage })),
-);
+const WelcomePage = pageOnDemand(() => import('../features/account/WelcomePage').then((m) => m.WelcomePage));
 
 /** Shows a page once a log is open; before the first one, the welcome in its place. */
 export function LogGate({ page, children }: { readonly page: PageName; readonly children: ReactNode }) {

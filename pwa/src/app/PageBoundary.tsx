@@ -1,4 +1,4 @@
-import { Component, Suspense, type ErrorInfo, type ReactNode } from 'react';
+import { Component, type ErrorInfo, type ReactNode } from 'react';
 import { BrokenPage } from './BrokenPage';
 
 type PageBoundaryProps = { readonly children: ReactNode };
@@ -18,6 +18,6 @@ export class PageBoundary extends Component<PageBoundaryProps, PageBoundaryState
 
   override render(): ReactNode {
     if (this.state.error) return <BrokenPage error={this.state.error} />;
-    return <Suspense fallback={null}>{this.props.children}</Suspense>;
+    return this.props.children;
   }
 }

@@ -1,6 +1,7 @@
 import { useSyncExternalStore } from 'react';
 import type { Workbox } from 'workbox-window';
 import { nowMs } from '../../platform/clock';
+import { whenIdle } from '../../platform/idle';
 import { keepFineMap } from '../../platform/map-data';
 import { anyUnsavedWork, onAllSaved } from '../../platform/unsaved-work';
 import { onVisibilityChange } from '../../platform/visibility';
@@ -26,7 +27,7 @@ export async function registerWorker(): Promise<void> {
     tellAll();
   });
   followVisibility(workbox);
-  void navigator.serviceWorker.ready.then(() => requestIdle(() => void keepFineMap()));
+  void navigator.serviceWorker.ready.then(() => whenIdle(() => void keepFineMap()));
   await workbox.register();
 }
 
@@ -55,11 +56,6 @@ export function useUpdateReady(): boolean {
 function reloadWhenSaved(): void {
   if (!anyUnsavedWork()) location.reload();
   else onAllSaved(() => location.reload());
-}
-
-function requestIdle(act: () => void): void {
-  if ('requestIdleCallback' in window) window.requestIdleCallback(act, { timeout: 10_000 });
-  else setTimeout(act, 4000);
 }
 
 function subscribe(listener: () => void): () => void {
