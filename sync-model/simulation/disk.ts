@@ -1,6 +1,6 @@
 import type { ClubState, RecordKey, Store, StoreTransaction } from '../src/device/ports.js';
 import type { StoredRecord } from '../src/device/stored-record.js';
-import type { Life, Scheduler } from './scheduler.js';
+import type { Life, Steps } from './scheduler.js';
 
 /** What survives a crash of a phone: only what was committed. */
 export type DiskState = {
@@ -34,7 +34,7 @@ export class MemoryStores {
   constructor(
     private readonly disk: Disk,
     private readonly life: Life,
-    private readonly scheduler: Scheduler,
+    private readonly scheduler: Steps,
   ) {}
 
   for(writer: Writer): Store {

@@ -11,7 +11,7 @@ import type {
 import type { ClubCard } from '../src/protocol/messages.js';
 import type { Role } from '../src/records/member.js';
 import { parentsOf } from '../src/records/record-types.js';
-import type { Life, Scheduler } from './scheduler.js';
+import type { Life, Steps } from './scheduler.js';
 
 export type HubClubState = {
   readonly clubId: string;
@@ -35,7 +35,7 @@ export class MemoryHub implements HubStore {
   waits = 0;
 
   constructor(
-    private readonly scheduler: Scheduler,
+    private readonly scheduler: Steps,
     private readonly onSave: SaveWatcher,
     public life: Life,
   ) {}

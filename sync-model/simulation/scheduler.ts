@@ -3,13 +3,19 @@ import type { Random } from './random.js';
 /** One run of one machine, from its start to its crash. What belongs to a dead life never goes on. */
 export type Life = { readonly name: string; isDead: boolean };
 
+/** Where every port call waits for its turn. */
+export type Steps = { step(life: Life, label: string): Promise<void> };
+
+/** Nothing waits: for tests of one thing at a time. */
+export const NO_WAITING: Steps = { step: () => Promise.resolve() };
+
 type Step = { readonly life: Life; readonly label: string; readonly resume: () => void };
 
 /**
  * Owns every resolution of every port call. Each awaited port call of every machine is one step here; the
  * seed decides which goes next, so that any interleaving, and a crash between any two calls, can happen.
  */
-export class Scheduler {
+export class Scheduler implements Steps {
   private steps: Step[] = [];
   private hash = 0x811c9dc5;
   count = 0;
