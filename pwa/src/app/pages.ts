@@ -29,7 +29,6 @@ const LOADERS: Readonly<Record<PageName, LoadPage>> = {
   targetLists: () => import('../features/desk/TargetListsPage').then((m) => m.TargetListsPage),
   targetList: () => import('../features/desk/TargetListPage').then((m) => m.TargetListPage),
   targetListImport: () => import('../features/desk/TargetImportPage').then((m) => m.TargetImportPage),
-  clubSettings: () => import('../features/desk/ClubSettingsPage').then((m) => m.ClubSettingsPage),
   account: () => import('../features/account/AccountPage').then((m) => m.AccountPage),
   signIn: () => import('../features/account/SignInPage').then((m) => m.SignInPage),
   signUp: () => import('../features/account/SignUpPage').then((m) => m.SignUpPage),

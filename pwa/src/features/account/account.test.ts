@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { initialsOf } from './AccountBadge';
-import { answerWords } from './answer-words';
+import { answerWords } from '../../platform/api/answer-words';
 import { linkToken } from './link-token';
 
 describe('initials', () => {

@@ -1,7 +1,7 @@
 import { useState } from 'react';
 import { useFormErrors, type FieldFault } from '../../design/form/use-form-errors';
 import type { ApiAnswer } from '../../platform/api/api-request';
-import { answerWords, faultsOfAnswer } from './answer-words';
+import { answerWords, faultsOfAnswer } from '../../platform/api/answer-words';
 
 /** A form that asks the server once: busy while it asks, with the refusal in words beside the fields concerned. */
 export function useRequest() {

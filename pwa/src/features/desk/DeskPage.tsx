@@ -1,11 +1,17 @@
-import { EmptyState } from '../../design/states/EmptyState';
+import { RowLink } from '../../design/layout/RowLink';
 import { PageFrame } from '../../design/page/PageFrame';
+import { paths } from '../../platform/paths';
 
-/** Desk. */
+/** What organizers and admins do for the club. */
 export function DeskPage() {
   return (
     <PageFrame title="Desk">
-      <EmptyState title="Not here yet" sentence="This screen is being built. Nothing can be entered on it." />
+      <RowLink
+        to={paths.targetLists()}
+        name="Target lists"
+        note="Make, import and publish what to listen for"
+      />
+      <RowLink to={paths.people()} name="People" note="Members, roles and the join code" />
     </PageFrame>
   );
 }

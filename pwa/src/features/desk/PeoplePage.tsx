@@ -1,12 +1,115 @@
-import { EmptyState } from '../../design/states/EmptyState';
+import { ROLES, type Role } from '@harkmoor/sync-model/records/member';
+import { useState } from 'react';
+import { Button } from '../../design/button/Button';
+import { SelectField } from '../../design/form/SelectField';
+import { Section } from '../../design/layout/Section';
+import { NoticeLine } from '../../design/notice/NoticeLine';
 import { PageFrame } from '../../design/page/PageFrame';
+import { EmptyState } from '../../design/states/EmptyState';
+import { DataTable, type Column } from '../../design/table/DataTable';
+import { answerWords } from '../../platform/api/answer-words';
 import { paths } from '../../platform/paths';
+import { useSending } from '../../platform/sending';
+import { utcDate } from '../../platform/utc-text';
+import { changeRole, usePeople, type People, type PersonRow } from './data/use-people';
+import { JoinCodePart } from './JoinCodePart';
 
-/** People. */
+const ROLE_WORDS: Record<Role, string> = { member: 'Member', organizer: 'Organizer', admin: 'Admin' };
+const ROLE_OPTIONS = ROLES.map((role) => ({ value: role, label: ROLE_WORDS[role] }));
+
+/** Who is in the club, with which role; admins change roles and give out the join code. */
 export function PeoplePage() {
+  const people = usePeople();
   return (
-    <PageFrame title="People" back={{ to: paths.desk(), label: 'Desk' }}>
-      <EmptyState title="Not here yet" sentence="This screen is being built. Nothing can be entered on it." />
+    <PageFrame
+      title="People"
+      subtitle={people?.log.card.name}
+      back={{ to: paths.account(), label: 'Account' }}
+      wide
+    >
+      {people ? people.log.card.kind === 'my-log' ? <OwnLog /> : <ClubPeople people={people} /> : null}
     </PageFrame>
+  );
+}
+
+function OwnLog() {
+  return (
+    <EmptyState
+      title="My log is yours alone"
+      sentence="Nobody else is in it, and nobody else sees it. A club has people: choose or join one on the account page."
+    />
+  );
+}
+
+function ClubPeople({ people }: { readonly people: People }) {
+  const { log, rows } = people;
+  const { sendNow } = useSending();
+  const [notice, setNotice] = useState<string | null>(null);
+  const isAdmin = log.role === 'admin';
+
+  async function give(person: PersonRow, role: Role): Promise<void> {
+    const answer = await changeRole(log, person.accountId, role);
+    setNotice(
+      answer.kind === 'ok' ? `${person.name} is now ${ROLE_WORDS[role].toLowerCase()}.` : answerWords(answer),
+    );
+    if (answer.kind === 'ok') sendNow();
+  }
+  const columns: Column<PersonRow>[] = [
+    {
+      key: 'name',
+      header: 'Name',
+      cell: (row) => (row.isMe ? `${row.name} (you)` : row.name),
+      sortBy: (row) => row.name,
+    },
+    {
+      key: 'role',
+      header: 'Role',
+      sortBy: (row) => ROLES.indexOf(row.role),
+      cell: (row) =>
+        isAdmin && row.leftAt === null ? (
+          <SelectField
+            label={`Role of ${row.name}`}
+            required
+            options={ROLE_OPTIONS}
+            value={row.role}
+            onChange={(role) => void give(row, role)}
+          />
+        ) : row.leftAt === null ? (
+          ROLE_WORDS[row.role]
+        ) : (
+          'Former member'
+        ),
+    },
+    {
+      key: 'joined',
+      header: 'Since',
+      figures: true,
+      cell: (row) => utcDate(row.joinedAt),
+      sortBy: (row) => row.joinedAt,
+    },
+  ];
+  return (
+    <>
+      <NoticeLine text={notice} />
+      {rows.length === 0 ? (
+        <EmptyState
+          title="Not received yet"
+          sentence="The members come with the next round, once there is signal."
+          action={<Button onClick={sendNow}>Ask now</Button>}
+        />
+      ) : (
+        <DataTable
+          caption="Members of the club"
+          columns={columns}
+          rows={rows}
+          rowKey={(row) => row.accountId}
+        />
+      )}
+      {isAdmin ? (
+        <Section title="Invite by code">
+          <JoinCodePart log={log} />
+        </Section>
+      ) : null}
+    </>
   );
 }

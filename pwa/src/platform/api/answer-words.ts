@@ -1,5 +1,4 @@
-import type { FieldFault } from '../../design/form/use-form-errors';
-import type { ApiAnswer } from '../../platform/api/api-request';
+import type { ApiAnswer } from './api-request';
 
 type NotOk = Exclude<ApiAnswer<never>, { kind: 'ok' }>;
 
@@ -18,7 +17,7 @@ export function answerWords(answer: NotOk): string {
 }
 
 /** The server's remarks on single fields, for the form. */
-export function faultsOfAnswer(answer: NotOk): FieldFault[] {
+export function faultsOfAnswer(answer: NotOk): { field: string; message: string }[] {
   if (answer.kind !== 'refused') return [];
   return Object.entries(answer.fields).map(([field, message]) => ({ field, message }));
 }

@@ -1,0 +1,150 @@
+import { frequencyText, readFrequency } from '@harkmoor/sync-model/radio/bands/frequency-text';
+import { MODES } from '@harkmoor/sync-model/records/common-fields';
+import { targetSchema, type Target } from '@harkmoor/sync-model/records/target';
+import { useState, type FormEvent } from 'react';
+import { Button } from '../../../design/button/Button';
+import { ErrorSummary } from '../../../design/form/ErrorSummary';
+import { NumberField } from '../../../design/form/NumberField';
+import { SelectField } from '../../../design/form/SelectField';
+import { TextField } from '../../../design/form/TextField';
+import { useFormErrors, type FieldFault } from '../../../design/form/use-form-errors';
+import { schemaFaults } from '../../../platform/schema-faults';
+import { ScheduleField } from './ScheduleField';
+
+const MODE_OPTIONS = MODES.map((mode) => ({ value: mode, label: mode }));
+
+type TargetFormProps = {
+  readonly listId: string;
+  readonly target: Target | null;
+  readonly onSave: (target: Target) => Promise<void>;
+  readonly onRemove?: () => Promise<void>;
+};
+
+/** One target of a list. */
+export function TargetForm({ listId, target, onSave, onRemove }: TargetFormProps) {
+  const errors = useFormErrors();
+  const [values, setValues] = useState<Target>(target ?? newTarget(listId));
+  const [frequency, setFrequency] = useState(target ? frequencyText(target.frequencyHz) : '');
+  const set = (change: Partial<Target>): void => {
+    for (const field of Object.keys(change)) errors.mended(field);
+    setValues((before) => ({ ...before, ...change }));
+  };
+  const setPoint = (change: { latDeg?: number | null; lonDeg?: number | null }): void => {
+    const point = { latDeg: values.tx?.latDeg ?? null, lonDeg: values.tx?.lonDeg ?? null, ...change };
+    const isEmpty = point.latDeg === null && point.lonDeg === null;
+    set({ tx: isEmpty ? null : { latDeg: point.latDeg ?? Number.NaN, lonDeg: point.lonDeg ?? Number.NaN } });
+  };
+
+  async function submit(event: FormEvent): Promise<void> {
+    event.preventDefault();
+    const { frequencyHz, faults } = readHz(frequency);
+    const whole: Target = { ...values, name: values.name.trim().normalize('NFC'), frequencyHz };
+    if (errors.report([...faults, ...schemaFaults(targetSchema, whole)])) await onSave(whole);
+  }
+  const orNull = (text: string) => (text === '' ? null : text);
+  return (
+    <form ref={errors.ref} noValidate onSubmit={(event) => void submit(event)}>
+      <TextField
+        {...errors.field('name')}
+        label="Name"
+        required
+        maxLength={80}
+        value={values.name}
+        onChange={(name) => set({ name })}
+      />
+      <TextField
+        {...errors.field('frequencyHz')}
+        label="Frequency"
+        hint="Plain figures are kHz; write MHz for others"
+        required
+        figures
+        inputMode="text"
+        value={frequency}
+        onChange={setFrequency}
+      />
+      <SelectField
+        {...errors.field('mode')}
+        label="Mode"
+        required
+        options={MODE_OPTIONS}
+        value={values.mode}
+        onChange={(mode) => set({ mode })}
+      />
+      <ScheduleField errors={errors} schedule={values.schedule} onChange={(schedule) => set({ schedule })} />
+      <NumberField
+        {...errors.field('tx.latDeg')}
+        label="Transmitter latitude"
+        unit="°"
+        signed
+        value={values.tx?.latDeg ?? null}
+        onChange={(latDeg) => setPoint({ latDeg })}
+      />
+      <NumberField
+        {...errors.field('tx.lonDeg')}
+        label="Transmitter longitude"
+        unit="°"
+        signed
+        hint="East is positive"
+        value={values.tx?.lonDeg ?? null}
+        onChange={(lonDeg) => setPoint({ lonDeg })}
+      />
+      <NumberField
+        {...errors.field('powerKw')}
+        label="Power"
+        unit="kW"
+        value={values.powerKw}
+        onChange={(powerKw) => set({ powerKw })}
+      />
+      <TextField
+        {...errors.field('language')}
+        label="Language"
+        maxLength={40}
+        value={values.language ?? ''}
+        onChange={(text) => set({ language: orNull(text) })}
+      />
+      <TextField
+        {...errors.field('note')}
+        label="Note"
+        lines={2}
+        maxLength={4000}
+        value={values.note ?? ''}
+        onChange={(text) => set({ note: orNull(text) })}
+      />
+      <ErrorSummary form={errors} />
+      <Button type="submit" wide>
+        Save the target
+      </Button>
+      {onRemove ? (
+        <Button look="danger" onClick={() => void onRemove()}>
+          Remove from the list
+        </Button>
+      ) : null}
+    </form>
+  );
+}
+
+function newTarget(listId: string): Target {
+  return {
+    deleted: false,
+    importId: null,
+    listId,
+    name: '',
+    frequencyHz: 0,
+    mode: 'AM',
+    schedule: 'always',
+    silences: [],
+    tx: null,
+    powerKw: null,
+    language: null,
+    note: null,
+  };
+}
+
+/** An unreadable frequency becomes one that the schema takes, so that only its own sentence is shown. */
+function readHz(text: string): { frequencyHz: number; faults: FieldFault[] } {
+  const reading = readFrequency(text);
+  if (reading.kind === 'frequency') return { frequencyHz: reading.frequencyHz, faults: [] };
+  const message =
+    reading.kind === 'refused' ? reading.message : 'A metre band is no frequency: write the figure in kHz';
+  return { frequencyHz: 1000, faults: [{ field: 'frequencyHz', message }] };
+}
