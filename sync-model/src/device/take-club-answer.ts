@@ -34,14 +34,14 @@ export async function takeClubAnswer(
   if (!sent) return takeNewClub(tx, answer, club);
   if (!club) return { more: false, complete: false };
   const records = await touchedRecords(tx, answer, sent);
-  takeResults(records, answer, sent, taken);
+  const hasOwedAnew = takeResults(records, answer, sent, taken);
   takePage(records, answer, taken.accountId);
   const states = [...records.values()].filter((record) => record !== undefined);
   if (states.length > 0) await tx.putRecords(states);
   const unsettled = sent.changes.map(
     ({ change }) => records.get(`${change.type}/${change.id}`)?.debt?.status,
   );
-  const isWaiting = unsettled.includes('waiting') || sent.hasLeftover;
+  const isWaiting = unsettled.includes('waiting') || sent.hasLeftover || hasOwedAnew;
   const isAnswered = !isWaiting && !sent.hasWaiting && !unsettled.includes('held');
   const complete = isAnswered && !answer.more;
   await tx.putClub({
@@ -85,29 +85,35 @@ async function touchedRecords(
   return new Map([...keys.keys()].map((key, index) => [key, stored[index]]));
 }
 
-function neededParents(sent: SentClub, index: number, needs: string) {
+type Parent = { readonly type: RecordKey['type']; readonly id: string };
+
+function neededParents(sent: SentClub, index: number, needs: string): Parent[] {
   const change = sent.changes[index]?.change;
   return change ? parentsOf(change.type, change.fields).filter(({ id }) => id === needs) : [];
 }
 
-function takeResults(records: Touched, answer: SyncClubAnswer, sent: SentClub, taken: TakenWith): void {
+/** Answers true where parents go again that the server once had. */
+function takeResults(records: Touched, answer: SyncClubAnswer, sent: SentClub, taken: TakenWith): boolean {
+  let hasOwedAnew = false;
   answer.results.forEach((result, index) => {
     const owed = sent.changes[index];
     if (owed?.change.type !== result.type || owed.change.id !== result.id) return;
     const key = `${result.type}/${result.id}`;
     const record = records.get(key);
     if (record) records.set(key, withResult(record, owed, result, taken));
-    if (result.status === 'held') oweParents(records, neededParents(sent, index, result.needs), taken);
+    if (result.status !== 'held') return;
+    const parents = neededParents(sent, index, result.needs);
+    hasOwedAnew = parents.map((parent) => oweParent(records, parent, taken)).includes(true) || hasOwedAnew;
   });
+  return hasOwedAnew;
 }
 
 /** A parent of ours that the server once had and does not know any more goes again, whole. */
-function oweParents(records: Touched, parents: ReturnType<typeof neededParents>, taken: TakenWith): void {
-  for (const { type, id } of parents) {
-    const parent = records.get(`${type}/${id}`);
-    if (!parent || parent.seq === 0 || parent.debt || parent.ownerId !== taken.accountId) continue;
-    records.set(`${type}/${id}`, owedAnew(parent, taken.deviceNowMs));
-  }
+function oweParent(records: Touched, { type, id }: Parent, taken: TakenWith): boolean {
+  const parent = records.get(`${type}/${id}`);
+  if (!parent || parent.seq === 0 || parent.debt || parent.ownerId !== taken.accountId) return false;
+  records.set(`${type}/${id}`, owedAnew(parent, taken.deviceNowMs));
+  return true;
 }
 
 function takePage(records: Touched, answer: SyncClubAnswer, accountId: string): void {
