@@ -2,6 +2,7 @@ import { useIonRouter } from '@ionic/react';
 import type { Hand } from '../../platform/hand';
 import { buzz } from '../../platform/vibrate';
 import { useFieldActions } from './data/use-field-actions';
+import { OpenDraft } from './OpenDraft';
 import { padForSameAgain } from './pad-paths';
 import { ActLine } from './ui/ActLine';
 import { FieldFoot } from './ui/FieldFoot';
@@ -35,6 +36,9 @@ export function FieldFootParts({ field, hand, onSetups }: FieldFootPartsProps) {
   };
   const lines = (
     <>
+      <div className="fd-tall-only">
+        <OpenDraft />
+      </div>
       {field.isSetupQuestionDue && current ? (
         <SetupQuestion
           label={current.label}

@@ -1,4 +1,4 @@
-import { useEffect, useState } from 'react';
+import { Fragment, useEffect, useState } from 'react';
 import { useIonRouter } from '@ionic/react';
 import { frequencyText } from '@harkmoor/sync-model/radio/bands/frequency-text';
 import { Button } from '../../design/button/Button';
@@ -99,10 +99,10 @@ function PadFacts({ values, targetName, setupLabel }: PadFactsProps) {
   return (
     <span className="fd-facts num">
       {facts.map((fact, index) => (
-        <span key={index}>
-          {fact}
-          {index < facts.length - 1 ? ' · ' : ''}
-        </span>
+        <Fragment key={index}>
+          {index > 0 ? ' · ' : ''}
+          <span>{fact}</span>
+        </Fragment>
       ))}
     </span>
   );

@@ -56,7 +56,9 @@ export function RunningScreen({ field, areRowsStill, touchRows }: RunningScreenP
       {field.memory.cautionsRead ? null : (
         <CautionLine onRead={() => void act(() => actions.readCautions(outing.id))} />
       )}
-      <OpenDraft />
+      <div className="fd-short-only">
+        <OpenDraft />
+      </div>
       <RoundPart field={field} touchRows={touchRows} onEnd={() => setSheet('end')} />
       <InFoot>
         <FieldFootParts field={field} hand={hand} onSetups={() => setSheet('setups')} />
