@@ -23,7 +23,10 @@ createRoot(root).render(
     <App />
   </StrictMode>,
 );
-registerWorker().catch((error: unknown) =>
-  console.error('The application is not kept on this device', error),
-);
-whenIdle(preloadNext);
+// not in the way of the first screen
+whenIdle(() => {
+  registerWorker().catch((error: unknown) =>
+    console.error('The application is not kept on this device', error),
+  );
+}, 3000);
+setTimeout(() => whenIdle(preloadNext), 6000);
