@@ -1,10 +1,10 @@
 import { ROLES, type Role } from '@harkmoor/sync-model/records/member';
 import { useState } from 'react';
 import { Button } from '../../design/button/Button';
-import { SelectField } from '../../design/form/SelectField';
 import { Section } from '../../design/layout/Section';
 import { NoticeLine } from '../../design/notice/NoticeLine';
 import { PageFrame } from '../../design/page/PageFrame';
+import { Sheet } from '../../design/sheet/Sheet';
 import { EmptyState } from '../../design/states/EmptyState';
 import { DataTable, type Column } from '../../design/table/DataTable';
 import { answerWords } from '../../platform/api/answer-words';
@@ -13,9 +13,14 @@ import { useSending } from '../../platform/sending';
 import { utcDate } from '../../platform/utc-text';
 import { changeRole, usePeople, type People, type PersonRow } from './data/use-people';
 import { JoinCodePart } from './JoinCodePart';
+import './desk.css';
 
 const ROLE_WORDS: Record<Role, string> = { member: 'Member', organizer: 'Organizer', admin: 'Admin' };
-const ROLE_OPTIONS = ROLES.map((role) => ({ value: role, label: ROLE_WORDS[role] }));
+const ROLE_NOTES: Record<Role, string> = {
+  member: 'Member: logs and sees',
+  organizer: 'Organizer: also publishes target lists',
+  admin: 'Admin: also manages people',
+};
 
 /** Who is in the club, with which role; admins change roles and give out the join code. */
 export function PeoplePage() {
@@ -45,9 +50,11 @@ function ClubPeople({ people }: { readonly people: People }) {
   const { log, rows } = people;
   const { sendNow } = useSending();
   const [notice, setNotice] = useState<string | null>(null);
+  const [asked, setAsked] = useState<PersonRow | null>(null);
   const isAdmin = log.role === 'admin';
 
   async function give(person: PersonRow, role: Role): Promise<void> {
+    setAsked(null);
     const answer = await changeRole(log, person.accountId, role);
     setNotice(
       answer.kind === 'ok' ? `${person.name} is now ${ROLE_WORDS[role].toLowerCase()}.` : answerWords(answer),
@@ -66,18 +73,20 @@ function ClubPeople({ people }: { readonly people: People }) {
       header: 'Role',
       sortBy: (row) => ROLES.indexOf(row.role),
       cell: (row) =>
-        isAdmin && row.leftAt === null ? (
-          <SelectField
-            label={`Role of ${row.name}`}
-            required
-            options={ROLE_OPTIONS}
-            value={row.role}
-            onChange={(role) => void give(row, role)}
-          />
-        ) : row.leftAt === null ? (
-          ROLE_WORDS[row.role]
-        ) : (
+        row.leftAt !== null ? (
           'Former member'
+        ) : isAdmin ? (
+          <span className="desk-cell-button">
+            <Button
+              look="quiet"
+              aria-label={`Change the role of ${row.name}: ${ROLE_WORDS[row.role]}`}
+              onClick={() => setAsked(row)}
+            >
+              {ROLE_WORDS[row.role]}
+            </Button>
+          </span>
+        ) : (
+          ROLE_WORDS[row.role]
         ),
     },
     {
@@ -105,6 +114,18 @@ function ClubPeople({ people }: { readonly people: People }) {
           rowKey={(row) => row.accountId}
         />
       )}
+      <Sheet isOpen={asked !== null} title={`Role of ${asked?.name ?? ''}`} onClose={() => setAsked(null)}>
+        {ROLES.map((role) => (
+          <Button
+            key={role}
+            wide
+            look={asked?.role === role ? 'primary' : 'outline'}
+            onClick={() => asked && void give(asked, role)}
+          >
+            {ROLE_NOTES[role]}
+          </Button>
+        ))}
+      </Sheet>
       {isAdmin ? (
         <Section title="Invite by code">
           <JoinCodePart log={log} />

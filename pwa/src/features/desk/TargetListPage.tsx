@@ -114,9 +114,11 @@ function columnsOf(view: ListView, edit: (row: TargetRow) => void): Column<Targe
       sortBy: (row) => row.fields.name,
       cell: (row) =>
         view.mayEdit ? (
-          <Button look="quiet" onClick={() => edit(row)}>
-            {row.fields.name}
-          </Button>
+          <span className="desk-cell-button">
+            <Button look="quiet" onClick={() => edit(row)}>
+              {row.fields.name}
+            </Button>
+          </span>
         ) : (
           row.fields.name
         ),

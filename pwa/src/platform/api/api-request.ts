@@ -53,14 +53,14 @@ async function readAnswer<T>(response: Response | null): Promise<ApiAnswer<T>> {
   const body = await readJson(response);
   if (body === undefined) return { kind: 'unreachable' };
   if (response.ok) return { kind: 'ok', body: body as T };
-  const told = body as { code?: string; message?: string; fields?: Record<string, string> };
+  const told = body as { code?: string; message?: string; where?: { path: string; message: string }[] };
   if (response.status === 401 && told.code !== 'wrong-credentials') return { kind: 'signed-out' };
   return {
     kind: 'refused',
     status: response.status,
     code: told.code ?? 'refused',
     message: told.message ?? 'The server did not take this.',
-    fields: told.fields ?? {},
+    fields: Object.fromEntries((told.where ?? []).map(({ path, message }) => [path, message])),
   };
 }
 
