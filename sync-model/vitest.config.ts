@@ -5,5 +5,6 @@ export default defineConfig({
     environment: 'node',
     include: ['src/**/*.test.ts', 'simulation/**/*.test.ts'],
     testTimeout: 60_000,
+    maxWorkers: 2,
   },
 });

@@ -124,7 +124,7 @@ export function checkConverged(
     // What the server has refused stands on the phone as its person wrote it.
     const refused = new Set(held.filter(({ debt }) => debt).map(({ type, id }) => `${type}/${id}`));
     const ours = new Map(settled.map((record) => [`${record.type}/${record.id}`, textOf(record)]));
-    const theirs = new Map([...club.records].map(([key, record]) => [key, textOf(record)]));
+    const theirs = textsOf(club);
     for (const key of new Set([...ours.keys(), ...theirs.keys()])) {
       if (refused.has(key) || key.startsWith('history/')) continue;
       if (ours.get(key) !== theirs.get(key)) {
@@ -140,6 +140,16 @@ export function checkConverged(
       if (missing) oracle.violate('I9', `${deviceId} ${id} has no parent ${missing.id}`);
     }
   }
+}
+
+const textsByState = new WeakMap<HubClubState, ReadonlyMap<string, string>>();
+
+/** Once for all phones. */
+function textsOf(club: HubClubState): ReadonlyMap<string, string> {
+  const texts =
+    textsByState.get(club) ?? new Map([...club.records].map(([key, record]) => [key, textOf(record)]));
+  textsByState.set(club, texts);
+  return texts;
 }
 
 function textOf({ at, fields, stamps, ownerId, seq }: StoredRecord | HubRecord): string {

@@ -70,11 +70,17 @@ async function chooseChanges(tx: StoreTransaction, clubId: string, budget: Budge
       hasWaiting = true;
       continue;
     }
+    if (budget.changes === 0) {
+      hasLeftover = true;
+      break;
+    }
     const next = owedChange(record);
     const bytes = jsonBytes(next.change);
     if (bytes > CHANGE_BYTES_MAX) tooLarge.push(asTooLarge(record));
-    else if (budget.changes === 0 || budget.bytes < bytes) hasLeftover = true;
-    else {
+    else if (budget.bytes < bytes) {
+      budget.changes = 0;
+      hasLeftover = true;
+    } else {
       budget.changes -= 1;
       budget.bytes -= bytes;
       changes.push(next);
