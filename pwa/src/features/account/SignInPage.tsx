@@ -1,6 +1,6 @@
 import { useIonRouter } from '@ionic/react';
+import { ButtonLink } from '../../design/button/ButtonLink';
 import { useState } from 'react';
-import { Link } from 'react-router-dom';
 import { TextField } from '../../design/form/TextField';
 import { PageFrame } from '../../design/page/PageFrame';
 import { paths } from '../../platform/paths';
@@ -58,12 +58,14 @@ export function SignInPage() {
           onChange={setPassword}
         />
       </FormFrame>
-      <p>
-        <Link to={paths.resetPassword()}>Forgot the password</Link>
-      </p>
-      <p>
-        <Link to={paths.signUp()}>Make an account</Link>
-      </p>
+      <div className="account-acts">
+        <ButtonLink to={paths.resetPassword()} look="quiet">
+          Forgot the password
+        </ButtonLink>
+        <ButtonLink to={paths.signUp()} look="quiet">
+          Make an account
+        </ButtonLink>
+      </div>
     </PageFrame>
   );
 }
