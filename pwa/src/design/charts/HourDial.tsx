@@ -2,7 +2,7 @@ import { useId, useState, type KeyboardEvent } from 'react';
 import { rampOf, textOnRamp } from '../scale/cividis';
 import { useTheme, type Theme } from '../theme/theme';
 import { DialRim, type RimPart } from './DialRim';
-import { cellPath, pointAt, ringRadii } from './dial-geometry';
+import { cellPath, pointAt, ringRadii, type DialPoint } from './dial-geometry';
 import { steppedCell, type CellAt } from './dial-keys';
 import './charts.css';
 
@@ -110,26 +110,40 @@ type RingCellsProps = {
 function RingCells({ ring, index, count, theme, readHour, onRead }: RingCellsProps) {
   const [inner, outer] = ringRadii(index, count, INNER, OUTER);
   const ramp = rampOf(theme);
+  const isPrinted = theme === 'red-night' && outer - inner >= 9;
   return ring.cells.map(({ share, isThin, isTried }, hour) => {
     const shape = { fromHour: hour, toHour: hour + 1, inner, outer };
     const middle = pointAt((inner + outer) / 2, hour + 0.5);
     return (
       <g key={hour} onPointerEnter={() => onRead(hour)} onPointerDown={() => onRead(hour)}>
         <path className="hm-dial-empty" d={cellPath(shape, GAP, false)} />
-        {share === null ? (
-          isTried && <circle className="hm-dial-tried" cx={middle.x} cy={middle.y} r="1.6" />
-        ) : (
-          <path d={cellPath(shape, GAP, isThin)} fill={ramp(share)} />
-        )}
-        {theme === 'red-night' && share !== null && outer - inner >= 9 ? (
-          <text className="hm-dial-print" x={middle.x} y={middle.y + 4} fill={textOnRamp(share, theme)}>
-            {Math.round(share * 10)}
-          </text>
+        {share === null && isTried ? (
+          <circle className="hm-dial-tried" cx={middle.x} cy={middle.y} r="1.6" />
         ) : null}
+        {share !== null && !(isPrinted && isThin) ? (
+          <path d={cellPath(shape, GAP, isThin)} fill={ramp(share)} />
+        ) : null}
+        {share !== null && isPrinted ? <PrintedTens share={share} isThin={isThin} at={middle} /> : null}
         {readHour === hour ? <path className="hm-dial-read" d={cellPath(shape, 0, false)} /> : null}
       </g>
     );
   });
+}
+
+type PrintedTensProps = { readonly share: number; readonly isThin: boolean; readonly at: DialPoint };
+
+/** In red night: the rate in tens; a thin one has no ground, for its cell is smaller than a figure. */
+function PrintedTens({ share, isThin, at }: PrintedTensProps) {
+  return (
+    <text
+      className={isThin ? 'hm-dial-print hm-dial-print-thin' : 'hm-dial-print'}
+      x={at.x}
+      y={at.y + 4}
+      style={{ fill: isThin ? 'var(--soft-ink)' : textOnRamp(share, 'red-night') }}
+    >
+      {Math.round(share * 10)}
+    </text>
+  );
 }
 
 /** "49 m broadcast, 15–16 UTC: 83 % heard, 58 of 70". */

@@ -16,7 +16,12 @@ export function squareColumns(): Column<SquareFigures>[] {
     figure('hours', 'Hours', ({ rate }) => rate.hours, figureText),
     figure('score', 'Typical O', ({ score }) => score.median, String),
     figure('scored', 'Scored', ({ score }) => score.n, figureText),
-    { key: 'note', header: 'Note', cell: noteOf, sortBy: noteOf },
+    {
+      key: 'note',
+      header: 'Note',
+      cell: (square) => <span className="cov-note">{noteOf(square)}</span>,
+      sortBy: noteOf,
+    },
   ];
 }
 

@@ -26,7 +26,7 @@ export function BestFrequencies({ choices, view, onChoose }: BestFrequenciesProp
       {choices.length === 0 ? (
         <p className="soft">Nothing was tried in these hours.</p>
       ) : (
-        <div className="hm-table-scroll" role="region" aria-label={title} tabIndex={0}>
+        <div className="hm-table-scroll" role="region" aria-label="Frequencies, ranked" tabIndex={0}>
           <table className="hm-table">
             <thead>
               <tr>

@@ -9,7 +9,7 @@ import { counted, percentWords } from '../view/scope-words';
 export function HeadFigures({ answer }: { readonly answer: EvidenceAnswer }) {
   const { rate, score, scoresBeside } = answer;
   return (
-    <>
+    <div className="cov-figures">
       <FigureRow>
         <Figure
           value={rate.rate === null ? '–' : percentWords(rate.rate)}
@@ -38,7 +38,7 @@ export function HeadFigures({ answer }: { readonly answer: EvidenceAnswer }) {
           </li>
         ) : null}
       </ul>
-    </>
+    </div>
   );
 }
 

@@ -1,4 +1,5 @@
 import type { DialRing, DialRings } from '@harkmoor/sync-model/evidence/hour-dial';
+import { NO_RATE_WORDS } from '@harkmoor/sync-model/evidence/heard-rate';
 import { centreOf } from '@harkmoor/sync-model/radio/locator/locator';
 import { useMemo } from 'react';
 import { HourDial, type DialRingFigures } from '../../../design/charts/HourDial';
@@ -25,8 +26,8 @@ type SquareDialProps = {
 };
 
 const RING_CHOICES = [
-  { value: 'bands', label: 'Bands' },
   { value: 'channels', label: 'Channels' },
+  { value: 'bands', label: 'Bands' },
 ] as const;
 
 /** The hour dial of a square over all hours, with the sun there on the middle day of the dates, and its table. */
@@ -59,6 +60,9 @@ export function SquareDial({ view, overview, dial, rings, onRings }: SquareDialP
         {names.join(', ') || 'none'}.
         {dial.ringsLeftOut > 0 ? ` ${counted(dial.ringsLeftOut, 'ring')} less tried left out.` : ''}
       </p>
+      {figures.length > 0 && figures.every(({ cells }) => cells.every(({ share }) => share === null)) ? (
+        <p className="small">{NO_RATE_WORDS['too-few-channels']}</p>
+      ) : null}
       <DialTable rings={figures} place={place} />
     </Section>
   );

@@ -23,7 +23,7 @@ type SquareEvidenceProps = {
 
 /** The evidence of the chosen square, or of all squares together, down to the receptions behind it. */
 export function SquareEvidence({ view, overview, onChange, hideHead = false }: SquareEvidenceProps) {
-  const [rings, setRings] = useState<DialRings>('bands');
+  const [rings, setRings] = useState<DialRings>('channels');
   const [listed, setListed] = useState(LISTED_AT_FIRST);
   const state = useAnswer(evidenceQuestion(view, overview, { rings, listed }));
   if (state.kind === 'reading') return <p className="soft">Counting…</p>;

@@ -32,8 +32,8 @@ function beyond(x: number, y: number, { widthPx, heightPx }: CanvasView): number
 }
 
 /** Traces a ring, passing over points that lie beyond one side together with both their neighbours. */
-function traceRing(
-  context: CanvasRenderingContext2D,
+export function traceRing(
+  context: Pick<CanvasRenderingContext2D, 'moveTo' | 'lineTo' | 'closePath'>,
   { points }: LandRing,
   view: CanvasView,
   copy: number,

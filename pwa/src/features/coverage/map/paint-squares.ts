@@ -35,12 +35,23 @@ export function paintMarks(
   palette: MapPalette,
 ): void {
   for (const copy of worldCopies(view)) {
-    if (selected !== null) outline(context, rectPx(rectOf(selected), view, copy), palette.ink, 3, []);
+    if (selected !== null) mark(context, rectPx(rectOf(selected), view, copy), palette, []);
     if (cursor !== null && cursor !== selected) {
-      outline(context, rectPx(rectOf(cursor), view, copy), palette.paper, 5, []);
-      outline(context, rectPx(rectOf(cursor), view, copy), palette.ink, 3, [6, 3]);
+      mark(context, rectPx(rectOf(cursor), view, copy), palette, [6, 3]);
     }
   }
+}
+
+/** An outline outside the square with paper under it: in red night the square itself is as red as the ink. */
+function mark(
+  context: CanvasRenderingContext2D,
+  { x0, y0, x1, y1 }: WorldRect,
+  palette: MapPalette,
+  dash: number[],
+): void {
+  const outside = { x0: x0 - 2, y0: y0 - 2, x1: x1 + 2, y1: y1 + 2 };
+  outline(context, outside, palette.paper, 6, []);
+  outline(context, outside, palette.ink, 3, dash);
 }
 
 function paintSquare(
@@ -56,6 +67,8 @@ function paintSquare(
     return;
   }
   if (figures.coarseOnly) {
+    // a fine line below the dashes, for the brightest and the darkest of them vanish on their grounds
+    outline(context, rect, palette.border, 1, []);
     outline(context, rect, ramp(fill.share), fill.isThin ? 2 : 4, [8, 5]);
   } else {
     context.fillStyle = ramp(fill.share);

@@ -28,7 +28,7 @@ export function distributionWords({ distribution }: TypicalScore): string {
     .map((n, index) => ({ score: index + 1, n }))
     .filter(({ n }) => n > 0)
     .reverse()
-    .map(({ score, n }) => `${score} in ${figureText(n)}`)
+    .map(({ score, n }) => `${score}\u00a0in\u00a0${figureText(n)}`)
     .join(' · ');
 }
 
