@@ -7,7 +7,7 @@ type FrequencyKeysProps = {
   readonly onText: (text: string) => void;
   /** The reading with its band and service, or what is wrong; said above the keys. */
   readonly reading: ReactNode;
-  /** Ways to mean it otherwise: MHz, a metre band. */
+  /** Ways to mean it otherwise: MHz, a metre band. Below the keys, which must not move while they are tapped. */
   readonly offers?: ReactNode;
   /** The Enter key of a keyboard. */
   readonly onEnter?: () => void;
@@ -72,7 +72,6 @@ export function FrequencyKeys({ text, onText, reading, offers, onEnter }: Freque
       <div className="hm-freq-reading" role="status">
         {reading}
       </div>
-      {offers ? <div className="hm-freq-offers">{offers}</div> : null}
       <div className="hm-freq-keys">
         {KEYS.map((key) => (
           <button
@@ -86,6 +85,7 @@ export function FrequencyKeys({ text, onText, reading, offers, onEnter }: Freque
           </button>
         ))}
       </div>
+      {offers ? <div className="hm-freq-offers">{offers}</div> : null}
     </div>
   );
 }

@@ -6,6 +6,7 @@ import { paths } from '../../platform/paths';
 import { useOwnOutings, type StoredOuting } from './data/running-outing';
 import { FieldFrame, InFoot } from './ui/FieldFrame';
 import { ModeChips } from './ui/ModeChips';
+import type { FrequencyEntry } from './use-frequency-entry';
 import { useFrequencyAnswers } from './use-frequency-answers';
 
 /** Frequency entry: our own keys; a planned try is heard or nil, a signal that was simply met is by chance. */
@@ -42,16 +43,7 @@ function Entry({ outing }: { readonly outing: StoredOuting }) {
             {target ? ` · ${target.fields.name}` : ''}
           </span>
         }
-        offers={entry.offers.map((offer) => (
-          <button
-            key={offer.label}
-            type="button"
-            className="fd-offer num"
-            onClick={() => entry.setText(offer.text)}
-          >
-            {offer.label}
-          </button>
-        ))}
+        offers={<Offers entry={entry} />}
         onEnter={() => openPad('planned')}
       />
       <ModeChips mode={entry.mode} onMode={entry.setMode} />
@@ -94,4 +86,17 @@ function Entry({ outing }: { readonly outing: StoredOuting }) {
       </InFoot>
     </div>
   );
+}
+
+function Offers({ entry }: { readonly entry: FrequencyEntry }) {
+  return entry.offers.map((offer) => (
+    <button
+      key={offer.label}
+      type="button"
+      className="fd-offer num"
+      onClick={() => entry.setText(offer.text)}
+    >
+      {offer.label}
+    </button>
+  ));
 }

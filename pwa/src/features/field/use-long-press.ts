@@ -4,6 +4,7 @@ const LONG_PRESS_MS = 500;
 const MOVE_LIMIT_PX = 12;
 /** A browser sends the click of a release within this time. */
 const CLICK_FOLLOWS_MS = 120;
+const LONGEST_HOLD_MS = 5000;
 
 /**
  * A tap and a long press on one button. Each is told the moment at which the finger came down, ms UTC of the
@@ -19,7 +20,7 @@ export function useLongPress(acts: { onTap: (atMs: number) => void; onLongPress:
   };
   return {
     onPointerDown: ({ clientX: x, clientY: y, button }: PointerEvent) => {
-      if (button !== 0) return;
+      if (button > 0) return; // a right or middle mouse button
       const atMs = Date.now();
       press.current = { atMs, x, y, isSpent: false };
       clearTimeout(timer.current);
@@ -49,17 +50,27 @@ export function useLongPress(acts: { onTap: (atMs: number) => void; onLongPress:
   };
 }
 
-/** What opened under the finger must not take the click of its release for a tap beside it. */
+/**
+ * What opened under the finger must not take the click of its release for a tap beside it. One click at most is
+ * swallowed, and none a moment after the release, or where no release is ever told.
+ */
 function swallowClickOfRelease(): void {
-  const swallow = (event: Event): void => {
+  const releases = ['pointerup', 'pointercancel', 'touchend'] as const;
+  let timer = setTimeout(stop, LONGEST_HOLD_MS);
+  function swallow(event: Event): void {
     event.stopPropagation();
     event.preventDefault();
-  };
-  const releases = ['pointerup', 'pointercancel', 'touchend'] as const;
-  const released = (): void => {
+    stop();
+  }
+  function released(): void {
+    clearTimeout(timer);
+    timer = setTimeout(stop, CLICK_FOLLOWS_MS);
+  }
+  function stop(): void {
+    clearTimeout(timer);
+    window.removeEventListener('click', swallow, true);
     for (const release of releases) window.removeEventListener(release, released, true);
-    setTimeout(() => window.removeEventListener('click', swallow, true), CLICK_FOLLOWS_MS);
-  };
+  }
   window.addEventListener('click', swallow, true);
   for (const release of releases) window.addEventListener(release, released, true);
 }
