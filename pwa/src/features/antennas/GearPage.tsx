@@ -33,14 +33,14 @@ function GearLists({ gear }: { readonly gear: Gear }) {
           )
         }
       >
-        {gear.setups
+        {ownFirst(gear)
           .filter(({ setup }) => setup.fields.retiredAt === null)
           .map((row) => (
             <RowLink
               key={row.setup.id}
               to={paths.setup(row.setup.id)}
               name={setupName(row)}
-              note={setupNote(row.setup.fields) + ownerNote(gear, row.setup)}
+              note={joined(setupNote(row.setup.fields), ownerNote(gear, row.setup))}
             />
           ))}
       </Section>
@@ -59,7 +59,7 @@ function GearLists({ gear }: { readonly gear: Gear }) {
               key={row.id}
               to={paths.antenna(row.id)}
               name={row.fields.name}
-              note={antennaNote(row.fields) + ownerNote(gear, row)}
+              note={joined(antennaNote(row.fields), ownerNote(gear, row))}
             />
           ))}
       </Section>
@@ -78,7 +78,7 @@ function GearLists({ gear }: { readonly gear: Gear }) {
               key={row.id}
               to={paths.receiver(row.id)}
               name={row.fields.name}
-              note={receiverNote(row.fields) + ownerNote(gear, row)}
+              note={joined(receiverNote(row.fields), ownerNote(gear, row))}
             />
           ))}
       </Section>
@@ -125,5 +125,18 @@ function Retired({ gear }: { readonly gear: Gear }) {
 /** Names are not unique: others' gear is shown with its owner. */
 function ownerNote(gear: Gear, record: { ownerId: string | null }): string {
   if (isOwn(gear.log, record)) return '';
-  return ` · ${gear.ownerNames.get(record.ownerId ?? '') ?? 'former member'}’s`;
+  return `${gear.ownerNames.get(record.ownerId ?? '') ?? 'former member'}’s`;
+}
+
+function joined(...parts: readonly string[]): string {
+  return parts.filter((part) => part !== '').join(' · ');
+}
+
+/** One's own setups first, by name; then those of others. */
+function ownFirst(gear: Gear): Gear['setups'] {
+  return [...gear.setups].sort(
+    (a, b) =>
+      Number(isOwn(gear.log, b.setup)) - Number(isOwn(gear.log, a.setup)) ||
+      setupName(a).localeCompare(setupName(b)),
+  );
 }
