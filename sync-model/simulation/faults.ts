@@ -1,3 +1,4 @@
+import type { RoundLimits } from '../src/protocol/limits.js';
 import type { FateWeights } from './network.js';
 import type { Random } from './random.js';
 
@@ -56,4 +57,13 @@ export function weatherFrom(random: Random): Weather {
 
 export function skewFrom(random: Random): number {
   return random.pick(SKEWS_MS);
+}
+
+/** Small ones, so that rounds, transactions and pages are cut. */
+export function limitsFrom(random: Random): RoundLimits {
+  return {
+    changesPerRound: 1 + random.below(5),
+    changesPerTransaction: 2,
+    recordsPerPage: 2 + random.below(6),
+  };
 }

@@ -1,20 +1,18 @@
-import type { StoredRecord } from '../src/device/stored-record.js';
-import { answerRound } from '../src/hub/answer-round.js';
 import type { RoundLimits } from '../src/protocol/limits.js';
-import type { SyncRequest } from '../src/protocol/messages.js';
 import { chooseAct, noveltyOf, type Novelty } from './acts.js';
 import { emptyDisk, type CommitWatcher } from './disk.js';
-import { GOOD_WEATHER, skewFrom, weatherFrom, type Weather } from './faults.js';
+import { GOOD_WEATHER, limitsFrom, skewFrom, weatherFrom, type Weather } from './faults.js';
 import { checkConverged, checkCursors, checkNothingReferredDeleted, checkSave } from './invariants.js';
-import { MemoryHub } from './memory-hub.js';
+import { HubProcess } from './hub-process.js';
+import { MemoryHub, type SaveWatcher } from './memory-hub.js';
 import { createNetwork, type Network } from './network.js';
 import { checkReadsOwnWrites, Oracle, type Violation } from './oracle.js';
 import type { PlantedFault } from './planted-faults.js';
-import { BO, CLUB, idOf, PHONES, startClubs } from './people.js';
+import { changeMembership, PHONES, startClubs } from './people.js';
 import { Phone } from './phone.js';
 import { randomFrom, type Random } from './random.js';
-import { noteRareCommit, noteRareSave, type RareState } from './rare-states.js';
-import { Scheduler, settled, type Life } from './scheduler.js';
+import { noteRareAnswer, noteRareCommit, noteRareSave, type RareState } from './rare-states.js';
+import { Scheduler, settled } from './scheduler.js';
 
 export type RunResult = {
   readonly seed: number;
@@ -49,12 +47,9 @@ class Fleet {
   private readonly network: Network;
   private readonly phones: Phone[];
   private weather: Weather;
-  /** Small, so that rounds, transactions and pages are cut. */
   private readonly limits: RoundLimits;
   private simMs = Date.UTC(2026, 5, 1);
-  private hubMade = 0x9000_0000;
-  private crashHub: () => void = () => {};
-  private hubCrashed!: Promise<'crashed'>;
+  private readonly server: HubProcess;
 
   constructor(
     seed: number,
@@ -62,26 +57,25 @@ class Fleet {
   ) {
     this.random = randomFrom(seed);
     this.weather = weatherFrom(this.random);
-    this.limits = {
-      changesPerRound: 1 + this.random.below(5),
-      changesPerTransaction: 2,
-      recordsPerPage: 2 + this.random.below(6),
-    };
+    this.limits = limitsFrom(this.random);
     this.scheduler = new Scheduler(this.random);
-    this.hub = new MemoryHub(
-      this.scheduler,
-      (before, after) => {
-        checkSave(this.oracle, before, after);
-        noteRareSave(this.reached, before, after);
-      },
-      this.startHub(),
-    );
+    const onSave: SaveWatcher = (before, after) => {
+      checkSave(this.oracle, before, after);
+      noteRareSave(this.reached, before, after);
+    };
+    this.hub = new MemoryHub(this.scheduler, onSave, { name: 'hub', isDead: false });
     for (const club of startClubs()) this.hub.put(club);
+    this.server = new HubProcess(this.hub, fault?.wrapHub?.(this.hub) ?? this.hub, this.scheduler, {
+      nowMs: () => this.simMs,
+      limits: this.limits,
+      onAnswer: (answer) => noteRareAnswer(this.reached, answer),
+      onError: (error) => this.report(error),
+    });
     this.network = createNetwork(
       this.scheduler,
       this.random,
       () => this.weather.fates,
-      (accountId, request) => this.answer(accountId, request),
+      (accountId, request) => this.server.answer(accountId, request),
     );
     this.phones = PHONES.map((phone, index) => this.startPhone(phone, index));
   }
@@ -137,7 +131,7 @@ class Fleet {
   private isSettled(phone: Phone): boolean {
     const clubs = [...phone.disk.state.clubs.values()];
     const isAtHead = clubs.every(({ clubId, cursor }) => cursor === this.hub.clubs.get(clubId)!.seq);
-    return isAtHead && phone.records().every((record) => !record.debt || isForThePerson(phone, record));
+    return isAtHead && phone.isSettled();
   }
 
   private checkRest(rounds: number): void {
@@ -169,9 +163,12 @@ class Fleet {
       }
       if (random.chance(weather.clockJumps)) phone.skewMs = skewFrom(random);
     }
-    if (random.chance(weather.hubCrashes)) this.restartHub();
+    if (random.chance(weather.hubCrashes)) {
+      this.reached.add('hub crashed');
+      this.server.restart();
+    }
     if (random.chance(weather.lateDeliveries) && this.network.deliverLate()) this.reached.add('late request');
-    if (random.chance(weather.memberships)) this.changeMembership();
+    if (random.chance(weather.memberships)) this.scheduler.note(changeMembership(this.hub, random));
   }
 
   private use(phone: Phone): void {
@@ -182,46 +179,6 @@ class Fleet {
       const act = chooseAct(phone, random, this.novelty);
       if (act) phone.act(act, report);
     }
-  }
-
-  /** Bo leaves the club, comes back, or changes role. */
-  private changeMembership(): void {
-    const club = this.hub.clubs.get(CLUB)!;
-    const members = new Map(club.members);
-    const role = this.random.pick(['organizer', 'member', null] as const);
-    if (role === null) members.delete(BO);
-    else members.set(BO, role);
-    this.hub.put({ ...club, members });
-    this.scheduler.note(`Bo is ${role ?? 'no member'}`);
-  }
-
-  private startHub(): Life {
-    this.hubCrashed = new Promise((resolve) => {
-      this.crashHub = () => resolve('crashed');
-    });
-    return { name: 'hub', isDead: false };
-  }
-
-  private restartHub(): void {
-    this.reached.add('hub crashed');
-    this.scheduler.kill(this.hub.life);
-    this.crashHub();
-    this.hub.restart(this.startHub());
-  }
-
-  private async answer(accountId: string, request: SyncRequest) {
-    const ports = {
-      store: this.fault?.wrapHub?.(this.hub) ?? this.hub,
-      nowMs: () => this.simMs,
-      newId: () => idOf((this.hubMade += 1)),
-    };
-    const answer = answerRound(ports, { accountId }, request, this.limits).catch((error: unknown) => {
-      this.report(error);
-      return 'crashed' as const;
-    });
-    const told = await Promise.race([answer, this.hubCrashed]);
-    if (told !== 'crashed') noteAnswer(this.reached, told);
-    return told;
   }
 
   private startPhone({ deviceId, accountId }: (typeof PHONES)[number], index: number): Phone {
@@ -250,22 +207,5 @@ class Fleet {
 
   private report(error: unknown): void {
     this.oracle.violate('error', error instanceof Error ? (error.stack ?? error.message) : String(error));
-  }
-}
-
-/** Refused, or waiting for something that was refused: no round can settle it. */
-function isForThePerson(phone: Phone, { debt }: StoredRecord): boolean {
-  if (debt?.status === 'refused') return true;
-  const isNeeded = ({ id }: StoredRecord) => id === debt?.needs;
-  return (
-    debt?.status === 'held' && phone.records().some((one) => isNeeded(one) && isForThePerson(phone, one))
-  );
-}
-
-function noteAnswer(reached: Set<RareState>, answer: Awaited<ReturnType<typeof answerRound>>): void {
-  if (answer.code) reached.add(`code: ${answer.code}`);
-  for (const club of answer.clubs) {
-    if (club.more && club.records.length > 0) reached.add('page was cut');
-    for (const result of club.results) reached.add(`result: ${result.status}`);
   }
 }

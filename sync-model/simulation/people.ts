@@ -1,5 +1,6 @@
 import type { Role } from '../src/records/member.js';
-import type { HubClubState } from './memory-hub.js';
+import type { HubClubState, MemoryHub } from './memory-hub.js';
+import type { Random } from './random.js';
 
 /** Ids in the form of UUIDv7, from a counter. */
 export function idOf(number: number): string {
@@ -40,4 +41,15 @@ function club(clubId: string, kind: 'club' | 'my-log', members: [string, Role][]
     records: new Map(),
     history: [],
   };
+}
+
+/** Bo leaves the club, comes back, or changes role; answers what happened. */
+export function changeMembership(hub: MemoryHub, random: Random): string {
+  const club = hub.clubs.get(CLUB)!;
+  const members = new Map(club.members);
+  const role = random.pick(['organizer', 'member', null] as const);
+  if (role === null) members.delete(BO);
+  else members.set(BO, role);
+  hub.put({ ...club, members });
+  return `Bo is ${role ?? 'no member'}`;
 }

@@ -107,6 +107,16 @@ export class Phone {
     return [...this.disk.state.records.values()];
   }
 
+  /** Nothing is owed any more but what needs the person: refused, or waiting for something refused. */
+  isSettled(): boolean {
+    return this.records().every((record) => !record.debt || this.isForThePerson(record));
+  }
+
+  private isForThePerson({ debt }: StoredRecord): boolean {
+    if (debt?.status !== 'held') return debt?.status === 'refused';
+    return this.records().some((one) => one.id === debt.needs && this.isForThePerson(one));
+  }
+
   private start(): void {
     const { world, life } = this;
     this.stores = new MemoryStores(this.disk, life, world.scheduler);

@@ -12,7 +12,8 @@ import type { FieldsByType } from '../src/records/schemas.js';
 import { createStamper } from '../src/stamp/device-clock.js';
 import { emptyDisk, keyOf, MemoryStores, type Disk } from './disk.js';
 import { MemoryHub } from './memory-hub.js';
-import { idOf, startClubs } from './people.js';
+import { CLUB, idOf, startClubs } from './people.js';
+import { SAMPLES } from './sample-fields.js';
 import { NO_WAITING } from './scheduler.js';
 
 /** A hub and phones on a good network where nothing waits: for tests of one situation at a time. */
@@ -119,4 +120,13 @@ export class QuietPhone {
     const body = asSyncAnswer(structuredClone(answer));
     return body ? { kind: 'answer', body } : { kind: 'unreachable' };
   }
+}
+
+/** A reception with all that it refers to, made on a phone in the club; answers its id. */
+export async function makeReception(on: QuietPhone): Promise<string> {
+  const site = await on.make(CLUB, 'site', SAMPLES.site('Ravnklit'));
+  const receiver = await on.make(CLUB, 'receiver', SAMPLES.receiver('bag receiver'));
+  const antenna = await on.make(CLUB, 'antenna', SAMPLES.antenna('long wire'));
+  const setup = await on.make(CLUB, 'setup', SAMPLES.setup(receiver, antenna));
+  return on.make(CLUB, 'reception', SAMPLES.reception(site, setup));
 }

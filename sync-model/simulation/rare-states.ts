@@ -1,3 +1,4 @@
+import type { SyncAnswer } from '../src/protocol/messages.js';
 import { stampOf } from '../src/merge/record-state.js';
 import { SERVER_DEVICE_ID } from '../src/stamp/stamp.js';
 import type { DiskState } from './disk.js';
@@ -78,5 +79,13 @@ export function noteRareCommit(reached: Set<RareState>, before: DiskState, after
         reached.add('edited while it was sent');
       if (stampOf(record, field) < stampOf(old, field)) reached.add('restamped');
     }
+  }
+}
+
+export function noteRareAnswer(reached: Set<RareState>, answer: SyncAnswer): void {
+  if (answer.code) reached.add(`code: ${answer.code}`);
+  for (const club of answer.clubs) {
+    if (club.more && club.records.length > 0) reached.add('page was cut');
+    for (const result of club.results) reached.add(`result: ${result.status}`);
   }
 }

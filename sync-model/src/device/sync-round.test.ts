@@ -1,15 +1,10 @@
 import { beforeEach, describe, expect, it } from 'vitest';
 import { ANNA, ANNAS_LOG, BO, CLUB } from '../../simulation/people.js';
-import { QuietWorld, type QuietPhone } from '../../simulation/quiet-world.js';
+import { makeReception, QuietWorld, type QuietPhone } from '../../simulation/quiet-world.js';
 import { SAMPLES } from '../../simulation/sample-fields.js';
-import { stampOf } from '../merge/record-state.js';
 import type { SyncAnswer } from '../protocol/messages.js';
-import { stampWallMs } from '../stamp/stamp.js';
 import type { LinkAnswer } from './ports.js';
 import { sendStateOf } from './stored-record.js';
-
-const MINUTE_MS = 60_000;
-const TEN_YEARS_MS = 10 * 365 * 24 * 60 * MINUTE_MS;
 
 let world: QuietWorld;
 let phone: QuietPhone;
@@ -22,14 +17,6 @@ beforeEach(async () => {
 const hubFields = (type: string, id: string) =>
   world.hub.clubs.get(CLUB)!.records.get(`${type}/${id}`)?.fields;
 const stateOf = (id: string) => sendStateOf(phone.record(CLUB, 'site', id), false);
-
-async function makeReception(on: QuietPhone): Promise<string> {
-  const site = await on.make(CLUB, 'site', SAMPLES.site('Ravnklit'));
-  const receiver = await on.make(CLUB, 'receiver', SAMPLES.receiver('bag receiver'));
-  const antenna = await on.make(CLUB, 'antenna', SAMPLES.antenna('long wire'));
-  const setup = await on.make(CLUB, 'setup', SAMPLES.setup(receiver, antenna));
-  return on.make(CLUB, 'reception', SAMPLES.reception(site, setup));
-}
 
 describe('the first rounds of a phone', () => {
   it('should learn of its clubs', () => {
@@ -196,115 +183,5 @@ describe('a club that ends for a person', () => {
     await phone.engine.runRound();
     expect([...phone.disk.state.clubs.keys()]).toEqual([ANNAS_LOG]);
     expect(phone.records('site').map(({ fields }) => fields.name)).toEqual(['mine']);
-  });
-});
-
-describe('two phones of one person, one 3 minutes fast and one 10 years fast', () => {
-  let fast: QuietPhone;
-  let id: string;
-  beforeEach(async () => {
-    id = await makeReception(phone);
-    await phone.syncAll();
-    phone.skewMs = 3 * MINUTE_MS;
-    fast = world.phone('phonea02', ANNA, TEN_YEARS_MS);
-    await fast.syncAll();
-  });
-
-  async function meet(): Promise<void> {
-    for (const one of [phone, fast, phone]) await one.syncAll();
-  }
-
-  it('should keep both edits of different fields', async () => {
-    await phone.edit(CLUB, 'reception', id, { remarks: 'three minutes' });
-    await fast.edit(CLUB, 'reception', id, { heardBy: 'ten years' });
-    await meet();
-    for (const one of [phone, fast]) {
-      expect(one.record(CLUB, 'reception', id).fields).toMatchObject({
-        remarks: 'three minutes',
-        heardBy: 'ten years',
-      });
-    }
-  });
-
-  it('should let the later stamp win the same field, keep the other in the history, and put it back', async () => {
-    await phone.edit(CLUB, 'reception', id, { remarks: 'three minutes' });
-    await fast.edit(CLUB, 'reception', id, { remarks: 'ten years' });
-    // The fast phone's stamp is refused as ahead and made anew at the server's time: earlier than + 3 minutes.
-    await meet();
-    expect(stampWallMs(stampOf(fast.record(CLUB, 'reception', id), 'remarks'))).toBe(
-      world.nowMs + 3 * MINUTE_MS,
-    );
-    for (const one of [phone, fast]) {
-      expect(one.record(CLUB, 'reception', id).fields.remarks).toBe('three minutes');
-      expect(one.records('history').map(({ fields }) => fields)).toMatchObject([
-        { field: 'remarks', replaced: { value: 'ten years' }, kept: { value: 'three minutes' }, clash: true },
-      ]);
-    }
-    await phone.edit(CLUB, 'reception', id, { remarks: 'ten years' });
-    await meet();
-    expect(fast.record(CLUB, 'reception', id).fields.remarks).toBe('ten years');
-    expect(world.hub.clubs.get(CLUB)!.history.at(-1)).toMatchObject({
-      replaced: { value: 'three minutes' },
-      clash: false,
-    });
-  });
-
-  it('should give new stamps to exactly the unsent values that are ahead', async () => {
-    const kept = stampOf(fast.record(CLUB, 'reception', id), 'outcome');
-    fast.skewMs = 4 * MINUTE_MS;
-    await fast.edit(CLUB, 'reception', id, { heardBy: 'near' });
-    const near = stampOf(fast.record(CLUB, 'reception', id), 'heardBy');
-    fast.skewMs = 10 * MINUTE_MS;
-    await fast.edit(CLUB, 'reception', id, { remarks: 'ahead', stationName: 'ahead too' });
-    await fast.syncAll();
-    const record = fast.record(CLUB, 'reception', id);
-    expect(stampOf(record, 'outcome')).toBe(kept);
-    expect(stampOf(record, 'heardBy')).toBe(near);
-    expect(stampWallMs(stampOf(record, 'remarks'))).toBe(world.nowMs);
-    expect(stampOf(record, 'remarks')).toBe(stampOf(record, 'stationName'));
-    expect(fast.disk.state.settings.get('clockOffsetMs')).toBe(-10 * MINUTE_MS);
-  });
-
-  it('should log on with the right time once the server has told it, and forget that when the clock is set', async () => {
-    expect(fast.disk.state.settings.get('clockOffsetMs')).toBe(-TEN_YEARS_MS);
-    await fast.edit(CLUB, 'reception', id, { remarks: 'x' });
-    expect(stampWallMs(stampOf(fast.record(CLUB, 'reception', id), 'remarks'))).toBe(world.nowMs);
-    fast.skewMs = 0;
-    await fast.syncAll();
-    expect(fast.disk.state.settings.get('clockOffsetMs')).toBe(0);
-  });
-});
-
-describe('an unsent value that a later one from elsewhere replaces', () => {
-  it('should still reach the history, and not stop the edit that follows', async () => {
-    world = new QuietWorld({ changesPerRound: 1, changesPerTransaction: 1, recordsPerPage: 50 });
-    phone = world.phone('phonea01', ANNA);
-    const other = world.phone('phonea02', ANNA);
-    for (const one of [phone, other]) await one.syncAll();
-    const id = await makeReception(phone);
-    for (const one of [phone, other]) await one.syncAll();
-    await phone.edit(CLUB, 'reception', id, { remarks: 'ours' });
-    world.nowMs += MINUTE_MS;
-    await other.edit(CLUB, 'reception', id, { remarks: 'theirs' });
-    await other.syncAll();
-    // The new site takes the only place of the round, so the page arrives before our value is sent.
-    await phone.make(CLUB, 'site', SAMPLES.site('other site'));
-    await phone.engine.runRound();
-    expect(phone.record(CLUB, 'reception', id).fields.remarks).toBe('theirs');
-    expect(phone.record(CLUB, 'reception', id).debt?.lost).toMatchObject([
-      { field: 'remarks', value: 'ours' },
-    ]);
-    await phone.edit(CLUB, 'reception', id, { remarks: 'ours again' });
-    for (const one of [phone, other]) await one.syncAll();
-    expect(other.record(CLUB, 'reception', id).fields.remarks).toBe('ours again');
-    const rows = world.hub.clubs
-      .get(CLUB)!
-      .history.map(({ replaced, kept, clash }) => [replaced.value, kept.value, clash]);
-    expect(rows).toEqual([
-      [null, 'theirs', false],
-      ['ours', 'theirs', true],
-      ['theirs', 'ours again', false],
-    ]);
-    expect(other.records('history')).toHaveLength(1);
   });
 });
