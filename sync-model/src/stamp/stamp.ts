@@ -62,7 +62,9 @@ function counted(wallMs: number, counter: number): { wallMs: number; counter: nu
   return { wallMs: wallMs + 1, counter: 0 };
 }
 
+/** A host whose clock cannot be read still gets stamps: the earliest ones. */
 function clampWall(wallMs: number): number {
+  if (Number.isNaN(wallMs)) return 0;
   return Math.min(WALL_MS_MAX, Math.max(0, Math.floor(wallMs)));
 }
 
