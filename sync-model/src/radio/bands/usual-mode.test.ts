@@ -13,6 +13,6 @@ it.each([
   [4_125_000, 'USB', 'ships on HF'],
   [98_500_000, 'FM', 'VHF broadcast'],
   [3_330_500, 'AM', '90 m broadcast'],
-] as const)('should offer for %i Hz the mode %s (%s)', (frequencyHz, mode) => {
+] as const)('should offer for %i Hz the mode %s (%s)', (frequencyHz, mode, _what) => {
   expect(usualMode(frequencyHz, 1)).toBe(mode);
 });
