@@ -70,10 +70,18 @@ export function createLogWriter(options: WriterOptions): LogWriter {
     return record;
   }
 
+  /** A form may outlive its club: what it wrote then would be sent to nobody and seen by nobody. */
+  async function mustHoldClubs(steps: readonly WriteStep[]): Promise<void> {
+    for (const clubId of new Set(steps.map((step) => step.clubId ?? options.clubId()))) {
+      if (!(await database.clubs.get(clubId))) throw new Error('this club is no longer on this phone');
+    }
+  }
+
   async function apply(steps: readonly WriteStep[]): Promise<StoredRecord[]> {
     const types = WRITABLE_TYPES.filter((type) => steps.some((step) => step.type === type));
     const tables = types.map((type) => database.recordTable(type));
-    const records = await database.transaction('rw', tables, async () => {
+    const records = await database.transaction('rw', [...tables, database.clubs], async () => {
+      await mustHoldClubs(steps);
       const written: StoredRecord[] = [];
       for (const step of steps) written.push(await applyStep(step));
       return written;

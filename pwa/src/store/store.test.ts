@@ -40,6 +40,13 @@ describe('the log writer', () => {
     expect(await readClubRecords(log, 'site')).toEqual([]);
   });
 
+  it('should refuse to write into a club that has left the phone', async () => {
+    const log = remember(await openTestAccountLog());
+    await createDexieStore(log.database).transaction((tx) => tx.removeClub(TEST_IDS.club));
+    await expect(log.writer.create('site', aSite())).rejects.toThrow('no longer on this phone');
+    expect(await log.database.recordTable('site').count()).toBe(0);
+  });
+
   it('should stamp an edit after the value it replaces although the clock went back', async () => {
     const log = remember(await openTestAccountLog());
     await log.database.settings.put({ name: SETTING.clockOffsetMs, value: 3_600_000 });
