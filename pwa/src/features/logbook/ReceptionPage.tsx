@@ -6,7 +6,6 @@ import { paths } from '../../platform/paths';
 import { useReception } from './data/use-reception';
 import { ReceptionView } from './record/ReceptionView';
 import { receptionTitle } from './record/title-words';
-import './logbook.css';
 
 const BACK = { to: paths.logbook(), label: 'Logbook' };
 

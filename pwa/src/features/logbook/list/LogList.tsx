@@ -7,6 +7,7 @@ import { headText, outcomeText } from '../view/row-words';
 import { ClashMark, RowState } from './RowState';
 import { useLines, type LineHeights, type ReadyView } from './use-lines';
 import { useRowKeys } from './use-row-keys';
+import './list.css';
 
 const HEIGHTS: LineHeights = { headRem: 2.75, rowRem: 5.25 };
 

@@ -7,6 +7,7 @@ import { ClashMark, RowState } from './RowState';
 import { useLines, type LineHeights, type ReadyView } from './use-lines';
 import { useRowKeys } from './use-row-keys';
 import '../../../design/table/table.css';
+import './list.css';
 
 const HEIGHTS: LineHeights = { headRem: 2.75, rowRem: 2.75 };
 const COLUMNS = ['UTC', 'Frequency', 'Station', 'Outcome', 'Antenna', 'Operator', 'State'] as const;

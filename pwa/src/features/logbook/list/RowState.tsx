@@ -2,6 +2,7 @@ import { SendStateMark } from '../../../design/states/SendStateMark';
 import { useSending } from '../../../platform/sending';
 import type { ShownRow } from '../index/log-view';
 import { sendStateOfRow } from '../view/row-words';
+import './list.css';
 
 type RowStateProps = { readonly row: Pick<ShownRow, 'id' | 'owed'>; readonly clubId: string };
 

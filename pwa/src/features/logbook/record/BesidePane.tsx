@@ -2,6 +2,7 @@ import { EmptyState } from '../../../design/states/EmptyState';
 import { useReception } from '../data/use-reception';
 import { ReceptionView } from './ReceptionView';
 import { receptionTitle } from './title-words';
+import './record.css';
 
 /** The right half of the logbook on a laptop: the record that is open, or how to open one. */
 export function BesidePane({ openId }: { readonly openId: string | null }) {

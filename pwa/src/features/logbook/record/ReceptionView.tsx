@@ -8,6 +8,7 @@ import { PlaceSection } from './PlaceSection';
 import { ReadingSection } from './ReadingSection';
 import { ScoreSection } from './ScoreSection';
 import { StateSection } from './StateSection';
+import './record.css';
 
 /** Everything that is known of one reception: what was read, what follows from it, and what became of it. */
 export function ReceptionView({ held }: { readonly held: HeldReception }) {
