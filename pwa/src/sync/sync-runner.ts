@@ -26,6 +26,7 @@ export function startSyncRunner(
   let timer: ReturnType<typeof setTimeout> | undefined;
   let isStopped = false;
   let failures = 0;
+  let isAskedMeanwhile = false;
 
   const tell = (change: Partial<SendingStatus>) => {
     status = { ...status, ...change };
@@ -37,7 +38,11 @@ export function startSyncRunner(
   };
 
   async function round(): Promise<void> {
-    if (status.isRunning || isStopped) return;
+    if (isStopped) return;
+    if (status.isRunning) {
+      isAskedMeanwhile = true; // what was written since the round began may not be in it
+      return;
+    }
     clearTimeout(timer);
     tell({ isRunning: true });
     const watch = setInterval(() => tell({ inFlight: engine.inFlight() }), 250);
@@ -52,7 +57,9 @@ export function startSyncRunner(
       lastContactAt: wasReached ? Date.now() : status.lastContactAt,
     });
     if (wasReached && !isStopped) onRoundDone();
-    wait(nextRoundDelayMs(end, failures, Math.random()));
+    const isWantedAgain = isAskedMeanwhile && wasReached;
+    isAskedMeanwhile = false;
+    wait(isWantedAgain ? 0 : nextRoundDelayMs(end, failures, Math.random()));
   }
 
   const request = () => wait(0);

@@ -4,6 +4,7 @@ import { useState } from 'react';
 import { TextField } from '../../design/form/TextField';
 import { PageFrame } from '../../design/page/PageFrame';
 import { paths } from '../../platform/paths';
+import { useSending } from '../../platform/sending';
 import { addressFaults } from './account-faults';
 import { signIn } from './data/session';
 import { useAccount, useGuestReceptions } from './data/use-account';
@@ -14,6 +15,7 @@ import { useRequest } from './use-request';
 export function SignInPage() {
   const view = useAccount();
   const router = useIonRouter();
+  const { sendNow } = useSending();
   const request = useRequest();
   const guestReceptions = useGuestReceptions();
   const [email, setEmail] = useState('');
@@ -25,7 +27,9 @@ export function SignInPage() {
     const done = await request.ask([...addressFaults(email), ...missing], () =>
       signIn({ email: email.trim(), password }, view.actions),
     );
-    if (done) router.push(paths.field(), 'root', 'replace');
+    if (!done) return;
+    if (done.body.takenOver > 0) sendNow();
+    router.push(paths.field(), 'root', 'replace');
   }
 
   return (

@@ -2,6 +2,7 @@ import { useRef, useState } from 'react';
 import { Button } from '../../design/button/Button';
 import { Section } from '../../design/layout/Section';
 import { NoticeLine } from '../../design/notice/NoticeLine';
+import { useSending } from '../../platform/sending';
 import { shareFile } from '../../platform/share-file';
 import { readInUnsentFile, unsentFile } from './data/unsent-file';
 import type { SendingState } from './data/use-sending-state';
@@ -12,6 +13,7 @@ type Log = Exclude<SendingState, { kind: 'no-log' }>['log'];
 /** Keeps what is only here as a file, and reads such a file in again. */
 export function UnsentFile({ log }: { readonly log: Log }) {
   const input = useRef<HTMLInputElement>(null);
+  const { sendNow } = useSending();
   const [notice, setNotice] = useState<string | null>(null);
 
   async function keep(): Promise<void> {
@@ -26,6 +28,7 @@ export function UnsentFile({ log }: { readonly log: Log }) {
     if (!file) return;
     const read = await readInUnsentFile(log, await file.text());
     if (input.current) input.current.value = '';
+    if (read.kind === 'read' && read.added > 0) sendNow();
     setNotice(
       read.kind === 'refused'
         ? read.message
