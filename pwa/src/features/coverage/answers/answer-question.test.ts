@@ -15,8 +15,8 @@ import { overviewOf } from './overview';
 const NAMES: ClubNames = {
   sites: new Map([['dune', 'Ravnklit dune']]),
   receivers: new Map([['bench', 'Bench set']]),
-  antennas: new Map([['wire', { name: 'Long wire', kind: 'wire' }]]),
-  setups: new Map([['bench-wire', { receiverId: 'bench', antennaId: 'wire' }]]),
+  antennas: new Map([['wire', { name: 'Long wire', kind: 'wire', ownerId: 'asta' }]]),
+  setups: new Map([['bench-wire', { receiverId: 'bench', antennaId: 'wire', ownerId: 'asta' }]]),
   targets: new Map([['plover', 'Radio Plover']]),
   people: new Map(),
 };
@@ -40,6 +40,24 @@ describe('what a club’s evidence answers', () => {
     expect(overview.channels[0]).toMatchObject({ key: '6070000', n: 7 });
     expect(overview.antennas[0]).toMatchObject({ label: 'Long wire', antennaKind: 'wire' });
     expect(overview.setups[0]?.label).toBe('Bench set, Long wire');
+  });
+
+  it('should tell two of a name apart by their owners', () => {
+    const twins = (ownerId: string) => ({ name: 'Whip', kind: 'whip' as const, ownerId });
+    const names = {
+      ...NAMES,
+      antennas: new Map([
+        ['wire', twins('asta')],
+        ['whip', twins('bo')],
+      ]),
+      people: new Map([
+        ['asta', 'Asta'],
+        ['bo', 'Bo'],
+      ]),
+    };
+    const receptions = [aReception('a'), aReception('b', { setupId: 'bench-whip' })];
+    const overview = overviewOf(countClub(anInput(receptions), names));
+    expect(overview.antennas.map(({ label }) => label).sort()).toEqual(['Whip · Asta', 'Whip · Bo']);
   });
 
   it('should never place a site that is shared at four characters finer', () => {

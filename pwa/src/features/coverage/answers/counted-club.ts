@@ -5,12 +5,14 @@ import type { Antenna } from '@harkmoor/sync-model/records/antenna';
 
 export type AntennaKind = Antenna['kind'];
 
+type Owned = { /** Null in a guest log. */ readonly ownerId: string | null };
+
 /** What things are called; an id without a name is not held by this device, or was emptied after the bin. */
 export type ClubNames = {
   readonly sites: ReadonlyMap<string, string>;
   readonly receivers: ReadonlyMap<string, string>;
-  readonly antennas: ReadonlyMap<string, { readonly name: string; readonly kind: AntennaKind }>;
-  readonly setups: ReadonlyMap<string, { readonly receiverId: string; readonly antennaId: string }>;
+  readonly antennas: ReadonlyMap<string, Owned & { readonly name: string; readonly kind: AntennaKind }>;
+  readonly setups: ReadonlyMap<string, Owned & { readonly receiverId: string; readonly antennaId: string }>;
   readonly targets: ReadonlyMap<string, string>;
   /** By account. */
   readonly people: ReadonlyMap<string, string>;

@@ -57,8 +57,13 @@ export async function readClub(
     names: {
       sites: mapped(sites, ({ fields }) => fields.name),
       receivers: mapped(receivers, ({ fields }) => fields.name),
-      antennas: mapped(antennas, ({ fields }) => ({ name: fields.name, kind: fields.kind })),
-      setups: mapped(setups, ({ fields }) => ({
+      antennas: mapped(antennas, ({ fields, ownerId }) => ({
+        name: fields.name,
+        kind: fields.kind,
+        ownerId,
+      })),
+      setups: mapped(setups, ({ fields, ownerId }) => ({
+        ownerId,
         receiverId: fields.receiverId,
         antennaId: fields.antennaId,
       })),

@@ -13,13 +13,14 @@ export function sampleWords({ heard, n, dates }: HeardRate): string {
   return `${figureText(heard)} of ${figureText(n)} · ${counted(dates, 'date')}`;
 }
 
-/** "83 % heard, 95 % 72–90, 58 of 70 on 31 dates, thin": a rate with all that belongs to it, in one line. */
+/** "83 % heard (mean of 3 hours), 95 % 72–90, 58 of 70 on 31 dates, thin": a rate with all that belongs to it, in one line. */
 export function rateSentence(rate: HeardRate): string {
   if (rate.rate === null) {
     return rate.n === 0 ? NO_RATE_WORDS[rate.reason] : `no rate, ${sampleSentence(rate)}`;
   }
   const thin = rate.isThin ? ', thin' : '';
-  return `${percentWords(rate.rate)} heard, ${intervalWords(rate)}, ${sampleSentence(rate)}${thin}`;
+  const mean = rate.hours > 1 ? ` (mean of ${rate.hours} hours)` : '';
+  return `${percentWords(rate.rate)} heard${mean}, ${intervalWords(rate)}, ${sampleSentence(rate)}${thin}`;
 }
 
 /** "4 in 22 · 3 in 29 · 2 in 7": how many got which score, the best first. */
