@@ -15,6 +15,24 @@ export function GearPage() {
 
 function GearLists({ gear }: { readonly gear: Gear }) {
   const isEmpty = gear.receivers.length + gear.antennas.length === 0;
+  const setups: GearLine[] = ownFirst(gear).map((row) => ({
+    to: paths.setup(row.setup.id),
+    name: setupName(row),
+    note: joined(setupNote(row.setup.fields), ownerNote(gear, row.setup)),
+    isRetired: row.setup.fields.retiredAt !== null,
+  }));
+  const antennas: GearLine[] = gear.antennas.map((row) => ({
+    to: paths.antenna(row.id),
+    name: row.fields.name,
+    note: joined(antennaNote(row.fields), ownerNote(gear, row)),
+    isRetired: row.fields.retiredAt !== null,
+  }));
+  const receivers: GearLine[] = gear.receivers.map((row) => ({
+    to: paths.receiver(row.id),
+    name: row.fields.name,
+    note: joined(receiverNote(row.fields), ownerNote(gear, row)),
+    isRetired: row.fields.retiredAt !== null,
+  }));
   return (
     <>
       {isEmpty ? (
@@ -23,100 +41,62 @@ function GearLists({ gear }: { readonly gear: Gear }) {
           sentence="Add a receiver and an antenna; together they make a setup, and each entry says with which it was heard."
         />
       ) : null}
-      <Section
+      <GearList
         title="Setups"
-        aside={
-          isEmpty ? null : (
-            <ButtonLink to={paths.newSetup()} look="quiet">
-              Add a setup
-            </ButtonLink>
-          )
-        }
-      >
-        {ownFirst(gear)
-          .filter(({ setup }) => setup.fields.retiredAt === null)
-          .map((row) => (
-            <RowLink
-              key={row.setup.id}
-              to={paths.setup(row.setup.id)}
-              name={setupName(row)}
-              note={joined(setupNote(row.setup.fields), ownerNote(gear, row.setup))}
-            />
-          ))}
-      </Section>
-      <Section
-        title="Antennas"
-        aside={
-          <ButtonLink to={paths.newAntenna()} look="quiet">
-            Add an antenna
-          </ButtonLink>
-        }
-      >
-        {gear.antennas
-          .filter((row) => row.fields.retiredAt === null)
-          .map((row) => (
-            <RowLink
-              key={row.id}
-              to={paths.antenna(row.id)}
-              name={row.fields.name}
-              note={joined(antennaNote(row.fields), ownerNote(gear, row))}
-            />
-          ))}
-      </Section>
-      <Section
+        add={isEmpty ? null : { to: paths.newSetup(), label: 'Add a setup' }}
+        lines={setups}
+      />
+      <GearList title="Antennas" add={{ to: paths.newAntenna(), label: 'Add an antenna' }} lines={antennas} />
+      <GearList
         title="Receivers"
-        aside={
-          <ButtonLink to={paths.newReceiver()} look="quiet">
-            Add a receiver
-          </ButtonLink>
-        }
-      >
-        {gear.receivers
-          .filter((row) => row.fields.retiredAt === null)
-          .map((row) => (
-            <RowLink
-              key={row.id}
-              to={paths.receiver(row.id)}
-              name={row.fields.name}
-              note={joined(receiverNote(row.fields), ownerNote(gear, row))}
-            />
-          ))}
-      </Section>
-      <Retired gear={gear} />
+        add={{ to: paths.newReceiver(), label: 'Add a receiver' }}
+        lines={receivers}
+      />
+      <Retired lines={[...setups, ...antennas, ...receivers].filter((line) => line.isRetired)} />
     </>
   );
 }
 
-function Retired({ gear }: { readonly gear: Gear }) {
-  const antennas = gear.antennas.filter((row) => row.fields.retiredAt !== null);
-  const receivers = gear.receivers.filter((row) => row.fields.retiredAt !== null);
-  const setups = gear.setups.filter(({ setup }) => setup.fields.retiredAt !== null);
-  if (antennas.length + receivers.length + setups.length === 0) return null;
+type GearLine = {
+  readonly to: string;
+  readonly name: string;
+  readonly note: string;
+  readonly isRetired: boolean;
+};
+
+type GearListProps = {
+  readonly title: string;
+  readonly add: { readonly to: string; readonly label: string } | null;
+  readonly lines: readonly GearLine[];
+};
+
+function GearList({ title, add, lines }: GearListProps) {
+  return (
+    <Section
+      title={title}
+      aside={
+        add ? (
+          <ButtonLink to={add.to} look="quiet">
+            {add.label}
+          </ButtonLink>
+        ) : null
+      }
+    >
+      {lines
+        .filter((line) => !line.isRetired)
+        .map(({ to, name, note }) => (
+          <RowLink key={to} to={to} name={name} note={note} />
+        ))}
+    </Section>
+  );
+}
+
+function Retired({ lines }: { readonly lines: readonly GearLine[] }) {
+  if (lines.length === 0) return null;
   return (
     <Section title="Retired">
-      {antennas.map((row) => (
-        <RowLink
-          key={row.id}
-          to={paths.antenna(row.id)}
-          name={row.fields.name}
-          note="Antenna; its evidence stays"
-        />
-      ))}
-      {receivers.map((row) => (
-        <RowLink
-          key={row.id}
-          to={paths.receiver(row.id)}
-          name={row.fields.name}
-          note="Receiver; its evidence stays"
-        />
-      ))}
-      {setups.map((row) => (
-        <RowLink
-          key={row.setup.id}
-          to={paths.setup(row.setup.id)}
-          name={setupName(row)}
-          note="Setup; its evidence stays"
-        />
+      {lines.map(({ to, name }) => (
+        <RowLink key={to} to={to} name={name} note="Its evidence stays" />
       ))}
     </Section>
   );

@@ -5,11 +5,11 @@ import { antennaFigures, antennaNote, receiverNote, setupNote } from './gear-wor
 import './antennas.css';
 
 /** Gear of others: to be read, not changed. */
-export function AntennaRead({ antenna }: { readonly antenna: Antenna }) {
+export function AntennaRead({ values: antenna }: { readonly values: Antenna }) {
   return <Lines lines={[antennaNote(antenna), ...antennaFigures(antenna), antenna.notes ?? '']} />;
 }
 
-export function ReceiverRead({ receiver }: { readonly receiver: Receiver }) {
+export function ReceiverRead({ values: receiver }: { readonly values: Receiver }) {
   return <Lines lines={[receiverNote(receiver), receiver.notes ?? '']} />;
 }
 

@@ -70,6 +70,25 @@ function SetupForm({
 }) {
   const form = useGearForm(initial, setupSchema);
   const acts = useGearActs(gear.log, 'setup', id);
+  return (
+    <GearFormFrame
+      errors={form.errors}
+      isDirty={form.isDirty}
+      isFaulty={form.isFaulty}
+      asksHow={false}
+      isRetired={initial.retiredAt !== null}
+      onPutAway={acts.putAway}
+      onTakeBack={acts.takeBack}
+      onSave={() => acts.save('correct', form.values)}
+    >
+      <SetupFields gear={gear} form={form} />
+    </GearFormFrame>
+  );
+}
+
+type SetupFieldsProps = { readonly gear: Gear; readonly form: ReturnType<typeof useGearForm<Setup>> };
+
+function SetupFields({ gear, form }: SetupFieldsProps) {
   const { values, set, errors } = form;
   const options = <
     T extends {
@@ -85,16 +104,7 @@ function SetupForm({
       .filter((row) => row.id === chosen || isUsable(gear, row))
       .map((row) => ({ value: row.id, label: row.fields.name }));
   return (
-    <GearFormFrame
-      errors={errors}
-      isDirty={form.isDirty}
-      isFaulty={form.isFaulty}
-      asksHow={false}
-      isRetired={initial.retiredAt !== null}
-      onPutAway={acts.putAway}
-      onTakeBack={acts.takeBack}
-      onSave={() => acts.save('correct', values)}
-    >
+    <>
       <SelectField
         {...errors.field('receiverId')}
         label="Receiver"
@@ -135,7 +145,7 @@ function SetupForm({
         value={values.preampDb}
         onChange={(value) => set('preampDb', value ?? 0)}
       />
-    </GearFormFrame>
+    </>
   );
 }
 

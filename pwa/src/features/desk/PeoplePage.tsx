@@ -61,7 +61,62 @@ function ClubPeople({ people }: { readonly people: People }) {
     );
     if (answer.kind === 'ok') sendNow();
   }
-  const columns: Column<PersonRow>[] = [
+  return (
+    <>
+      <NoticeLine text={notice} />
+      {rows.length === 0 ? (
+        <EmptyState
+          title="Not received yet"
+          sentence="The members come with the next round, once there is signal."
+          action={<Button onClick={sendNow}>Ask now</Button>}
+        />
+      ) : (
+        <DataTable
+          caption="Members of the club"
+          columns={columnsOf(isAdmin, setAsked)}
+          rows={rows}
+          rowKey={(row) => row.accountId}
+        />
+      )}
+      <RoleSheet
+        asked={asked}
+        onGive={(person, role) => void give(person, role)}
+        onClose={() => setAsked(null)}
+      />
+      {isAdmin ? (
+        <Section title="Invite by code">
+          <JoinCodePart log={log} />
+        </Section>
+      ) : null}
+    </>
+  );
+}
+
+type RoleSheetProps = {
+  readonly asked: PersonRow | null;
+  readonly onGive: (person: PersonRow, role: Role) => void;
+  readonly onClose: () => void;
+};
+
+function RoleSheet({ asked, onGive, onClose }: RoleSheetProps) {
+  return (
+    <Sheet isOpen={asked !== null} title={`Role of ${asked?.name ?? ''}`} onClose={onClose}>
+      {ROLES.map((role) => (
+        <Button
+          key={role}
+          wide
+          look={asked?.role === role ? 'primary' : 'outline'}
+          onClick={() => asked && onGive(asked, role)}
+        >
+          {ROLE_NOTES[role]}
+        </Button>
+      ))}
+    </Sheet>
+  );
+}
+
+function columnsOf(isAdmin: boolean, onAsk: (row: PersonRow) => void): Column<PersonRow>[] {
+  return [
     {
       key: 'name',
       header: 'Name',
@@ -80,7 +135,7 @@ function ClubPeople({ people }: { readonly people: People }) {
             <Button
               look="quiet"
               aria-label={`Change the role of ${row.name}: ${ROLE_WORDS[row.role]}`}
-              onClick={() => setAsked(row)}
+              onClick={() => onAsk(row)}
             >
               {ROLE_WORDS[row.role]}
             </Button>
@@ -97,40 +152,4 @@ function ClubPeople({ people }: { readonly people: People }) {
       sortBy: (row) => row.joinedAt,
     },
   ];
-  return (
-    <>
-      <NoticeLine text={notice} />
-      {rows.length === 0 ? (
-        <EmptyState
-          title="Not received yet"
-          sentence="The members come with the next round, once there is signal."
-          action={<Button onClick={sendNow}>Ask now</Button>}
-        />
-      ) : (
-        <DataTable
-          caption="Members of the club"
-          columns={columns}
-          rows={rows}
-          rowKey={(row) => row.accountId}
-        />
-      )}
-      <Sheet isOpen={asked !== null} title={`Role of ${asked?.name ?? ''}`} onClose={() => setAsked(null)}>
-        {ROLES.map((role) => (
-          <Button
-            key={role}
-            wide
-            look={asked?.role === role ? 'primary' : 'outline'}
-            onClick={() => asked && void give(asked, role)}
-          >
-            {ROLE_NOTES[role]}
-          </Button>
-        ))}
-      </Sheet>
-      {isAdmin ? (
-        <Section title="Invite by code">
-          <JoinCodePart log={log} />
-        </Section>
-      ) : null}
-    </>
-  );
 }

@@ -7,7 +7,7 @@ import { ErrorSummary } from '../../../design/form/ErrorSummary';
 import { NumberField } from '../../../design/form/NumberField';
 import { SelectField } from '../../../design/form/SelectField';
 import { TextField } from '../../../design/form/TextField';
-import { useFormErrors, type FieldFault } from '../../../design/form/use-form-errors';
+import { useFormErrors, type FieldFault, type FormErrors } from '../../../design/form/use-form-errors';
 import { schemaFaults } from '../../../platform/schema-faults';
 import { ScheduleField } from './ScheduleField';
 
@@ -29,21 +29,52 @@ export function TargetForm({ listId, target, onSave, onRemove }: TargetFormProps
     for (const field of Object.keys(change)) errors.mended(field);
     setValues((before) => ({ ...before, ...change }));
   };
-  const setPoint = (change: { latDeg?: number | null; lonDeg?: number | null }): void => {
-    const point = { latDeg: values.tx?.latDeg ?? null, lonDeg: values.tx?.lonDeg ?? null, ...change };
-    const isEmpty = point.latDeg === null && point.lonDeg === null;
-    set({ tx: isEmpty ? null : { latDeg: point.latDeg ?? Number.NaN, lonDeg: point.lonDeg ?? Number.NaN } });
-  };
-
   async function submit(event: FormEvent): Promise<void> {
     event.preventDefault();
     const { frequencyHz, faults } = readHz(frequency);
     const whole: Target = { ...values, name: values.name.trim().normalize('NFC'), frequencyHz };
     if (errors.report([...faults, ...schemaFaults(targetSchema, whole)])) await onSave(whole);
   }
-  const orNull = (text: string) => (text === '' ? null : text);
   return (
     <form ref={errors.ref} noValidate onSubmit={(event) => void submit(event)}>
+      <TargetFields
+        errors={errors}
+        values={values}
+        set={set}
+        frequency={frequency}
+        onFrequency={setFrequency}
+      />
+      <ErrorSummary form={errors} />
+      <Button type="submit" wide>
+        Save the target
+      </Button>
+      {onRemove ? (
+        <Button look="danger" onClick={() => void onRemove()}>
+          Remove from the list
+        </Button>
+      ) : null}
+    </form>
+  );
+}
+
+type TargetFieldsProps = {
+  readonly errors: FormErrors;
+  readonly values: Target;
+  readonly set: (change: Partial<Target>) => void;
+  readonly frequency: string;
+  readonly onFrequency: (text: string) => void;
+};
+
+function TargetFields({ errors, values, set, frequency, onFrequency }: TargetFieldsProps) {
+  const setPoint = (change: { latDeg?: number | null; lonDeg?: number | null }): void => {
+    const point = { latDeg: values.tx?.latDeg ?? null, lonDeg: values.tx?.lonDeg ?? null, ...change };
+    const isEmpty = point.latDeg === null && point.lonDeg === null;
+    set({ tx: isEmpty ? null : { latDeg: point.latDeg ?? Number.NaN, lonDeg: point.lonDeg ?? Number.NaN } });
+  };
+
+  const orNull = (text: string) => (text === '' ? null : text);
+  return (
+    <>
       <TextField
         {...errors.field('name')}
         label="Name"
@@ -60,7 +91,7 @@ export function TargetForm({ listId, target, onSave, onRemove }: TargetFormProps
         figures
         inputMode="text"
         value={frequency}
-        onChange={setFrequency}
+        onChange={onFrequency}
       />
       <SelectField
         {...errors.field('mode')}
@@ -110,16 +141,7 @@ export function TargetForm({ listId, target, onSave, onRemove }: TargetFormProps
         value={values.note ?? ''}
         onChange={(text) => set({ note: orNull(text) })}
       />
-      <ErrorSummary form={errors} />
-      <Button type="submit" wide>
-        Save the target
-      </Button>
-      {onRemove ? (
-        <Button look="danger" onClick={() => void onRemove()}>
-          Remove from the list
-        </Button>
-      ) : null}
-    </form>
+    </>
   );
 }
 
