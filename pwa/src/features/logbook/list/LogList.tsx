@@ -1,4 +1,5 @@
 import { formatFrequency } from '@harkmoor/sync-model/radio/bands/frequency-text';
+import { memo } from 'react';
 import { Link } from 'react-router-dom';
 import { paths } from '../../../platform/paths';
 import { figureText, THIN_SPACE, utcHourMinute } from '../../../platform/utc-text';
@@ -6,7 +7,7 @@ import { lineOfPlace, type GroupHead, type ShownRow } from '../index/log-view';
 import { headText, outcomeText } from '../view/row-words';
 import { ClashMark, RowState } from './RowState';
 import { useLines, type LineHeights, type ReadyView } from './use-lines';
-import { useRowKeys } from './use-row-keys';
+import { rowLink, useRowKeys, type RowStop } from './use-row-keys';
 import './list.css';
 
 const HEIGHTS: LineHeights = { headRem: 2.75, rowRem: 5.25 };
@@ -45,7 +46,9 @@ export function LogList({ state, clubId }: { readonly state: ReadyView; readonly
                 <Row
                   row={state.rowAt(line.place)}
                   clubId={clubId}
-                  link={keys.rowProps(line.place, line.place === stop)}
+                  place={line.place}
+                  isStop={line.place === stop}
+                  onReach={keys.onReach}
                 />
               )}
             </li>
@@ -68,15 +71,15 @@ function Head({ head }: { readonly head: GroupHead }) {
 type RowProps = {
   readonly row: ShownRow | undefined;
   readonly clubId: string;
-  readonly link: ReturnType<ReturnType<typeof useRowKeys>['rowProps']>;
-};
+} & RowStop;
 
-function Row({ row, clubId, link }: RowProps) {
+/** Drawn again only where something of it changed: scrolling moves its neighbours and not itself. */
+const Row = memo(function Row({ row, clubId, ...stop }: RowProps) {
   if (!row) return <span className="log-row log-row-coming" aria-hidden="true" />;
   const { figure, unit } = formatFrequency(row.dialHz);
   const note = [`${utcHourMinute(row.deviceAt)}${THIN_SPACE}UTC`, row.antenna, row.operator].filter(Boolean);
   return (
-    <Link to={paths.reception(row.id)} className="log-row" {...link}>
+    <Link to={paths.reception(row.id)} className="log-row" {...rowLink(stop)}>
       <span className="log-row-words">
         <span className="log-frequency num">
           {figure} <small>{unit}</small>
@@ -91,4 +94,4 @@ function Row({ row, clubId, link }: RowProps) {
       </span>
     </Link>
   );
-}
+});

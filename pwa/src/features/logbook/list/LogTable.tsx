@@ -1,16 +1,17 @@
 import { formatFrequency } from '@harkmoor/sync-model/radio/bands/frequency-text';
+import { memo } from 'react';
 import { Link } from 'react-router-dom';
 import { figureText, THIN_SPACE, utcHourMinute } from '../../../platform/utc-text';
 import { lineOfPlace, type GroupHead, type ShownRow } from '../index/log-view';
 import { headText, outcomeText, spokenFrequency } from '../view/row-words';
 import { ClashMark, RowState } from './RowState';
 import { useLines, type LineHeights, type ReadyView } from './use-lines';
-import { useRowKeys } from './use-row-keys';
+import { rowLink, useRowKeys, type RowStop } from './use-row-keys';
 import '../../../design/table/table.css';
 import './list.css';
 
 const HEIGHTS: LineHeights = { headRem: 2.75, rowRem: 2.75 };
-const COLUMNS = ['UTC', 'Frequency', 'Station', 'Outcome', 'Antenna', 'Operator', 'State'] as const;
+const COLUMNS = ['UTC', 'Frequency', 'Station', 'Outcome', 'Antenna', 'State'] as const;
 
 type LogTableProps = {
   readonly state: ReadyView;
@@ -58,9 +59,11 @@ export function LogTable({ state, clubId, openId, rowTo }: LogTableProps) {
                 row={state.rowAt(line.place)}
                 rowIndex={index + 2}
                 clubId={clubId}
-                openId={openId}
+                isOpen={state.rowAt(line.place)?.id === openId}
                 rowTo={rowTo}
-                link={keys.rowProps(line.place, line.place === stop)}
+                place={line.place}
+                isStop={line.place === stop}
+                onReach={keys.onReach}
               />
             ),
           )}
@@ -95,12 +98,12 @@ type RowProps = {
   readonly row: ShownRow | undefined;
   readonly rowIndex: number;
   readonly clubId: string;
-  readonly openId: string | null;
+  readonly isOpen: boolean;
   readonly rowTo: (id: string) => string;
-  readonly link: ReturnType<ReturnType<typeof useRowKeys>['rowProps']>;
-};
+} & RowStop;
 
-function Row({ row, rowIndex, clubId, openId, rowTo, link }: RowProps) {
+/** Drawn again only where something of it changed: scrolling moves its neighbours and not itself. */
+const Row = memo(function Row({ row, rowIndex, clubId, isOpen, rowTo, ...stop }: RowProps) {
   if (!row) {
     return (
       <tr aria-rowindex={rowIndex} className="log-table-row">
@@ -110,7 +113,6 @@ function Row({ row, rowIndex, clubId, openId, rowTo, link }: RowProps) {
   }
   const { figure, unit } = formatFrequency(row.dialHz);
   const time = utcHourMinute(row.deviceAt);
-  const isOpen = row.id === openId;
   return (
     <tr
       aria-rowindex={rowIndex}
@@ -122,7 +124,7 @@ function Row({ row, rowIndex, clubId, openId, rowTo, link }: RowProps) {
           replace
           aria-current={isOpen || undefined}
           aria-label={`${time} UTC, ${spokenFrequency(row.dialHz)}, ${row.station}`}
-          {...link}
+          {...rowLink(stop)}
         >
           {time}
         </Link>
@@ -131,11 +133,10 @@ function Row({ row, rowIndex, clubId, openId, rowTo, link }: RowProps) {
       <td>{row.station}</td>
       <td className="num log-table-outcome">{outcomeText(row)}</td>
       <td>{row.antenna}</td>
-      <td>{row.operator ?? 'Me'}</td>
       <td>
         {row.isClash ? <ClashMark /> : null}
         <RowState row={row} clubId={clubId} />
       </td>
     </tr>
   );
-}
+});

@@ -26,7 +26,12 @@ export function useLines(state: ReadyView, heights: LineHeights) {
     // a first frame with rows in it, before the element has been measured; also where nothing is ever laid out
     initialRect: { width: 390, height: 700 },
   });
-  useEffect(() => virtual.measure(), [virtual, heads]);
+  const measured = useRef(heads);
+  useEffect(() => {
+    if (measured.current === heads) return;
+    measured.current = heads;
+    virtual.measure();
+  }, [virtual, heads]);
   const items = virtual.getVirtualItems();
   const places = placesOf(
     heads,

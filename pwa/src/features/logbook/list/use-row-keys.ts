@@ -9,6 +9,18 @@ const STEPS: Readonly<Record<string, number>> = {
   End: Infinity,
 };
 
+/** What a row has to know of the keys; `isStop`: the one row that Tab comes to. */
+export type RowStop = {
+  readonly place: number;
+  readonly isStop: boolean;
+  readonly onReach: (place: number) => void;
+};
+
+/** What the link of a row carries, so that the keys find it. */
+export function rowLink({ place, isStop, onReach }: RowStop) {
+  return { 'data-place': place, tabIndex: isStop ? 0 : -1, onFocus: () => onReach(place) };
+}
+
 type RowKeysProps = {
   readonly scroller: RefObject<HTMLElement | null>;
   readonly rowCount: number;
@@ -41,11 +53,5 @@ export function useRowKeys({ scroller, rowCount, scrollToPlace }: RowKeysProps) 
     setActive(next);
     scrollToPlace(next);
   };
-  /** What each row's link carries; `isStop`: the one that Tab comes to. */
-  const rowProps = (at: number, isStop: boolean) => ({
-    'data-place': at,
-    tabIndex: isStop ? 0 : -1,
-    onFocus: () => setActive(at),
-  });
-  return { active: place, onKeyDown, rowProps };
+  return { active: place, onKeyDown, onReach: setActive };
 }

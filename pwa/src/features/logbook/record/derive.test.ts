@@ -41,7 +41,7 @@ describe('what follows from the readings', () => {
     const { time } = derive(held({}, { clockChecks: [{ ...check, offsetMs: -192_000 }] }));
     expect(time).toEqual({ atMs: AT - 192_000, basis: 'nearest', offsetMs: -192_000 });
     expect(timeBasisWords(time)).toBe(
-      'By the nearest clock check within 12 h: \u22123\u202fmin 12\u202fs added.',
+      'By the nearest clock check within 12 h: 3\u202fmin 12\u202fs taken off.',
     );
     const other = derive(held({}, { clockChecks: [{ ...check, deviceId: 'bbbbbbbb', offsetMs: 9000 }] }));
     expect(other.time.basis).toBe('unchecked');

@@ -9,21 +9,23 @@ import { figureText, isoDate, shortDate, utcDate, utcHourMinute, withUnit } from
 
 /** On what the corrected time rests. */
 export function timeBasisWords({ basis, offsetMs }: CorrectedTime): string {
-  const by = offsetMs === 0 ? 'nothing to correct' : `${signedSeconds(offsetMs)} added`;
+  const by =
+    offsetMs === 0
+      ? 'nothing to correct'
+      : `${lengthWords(offsetMs)} ${offsetMs < 0 ? 'taken off' : 'added'}`;
   if (basis === 'between') return `Between a clock check before and one after: ${by}.`;
   if (basis === 'nearest') return `By the nearest clock check within 12 h: ${by}.`;
   return 'The clock was not checked within 12 h: the device’s time as it is.';
 }
 
-/** "+0.3 s", "−3 min 12 s". */
-function signedSeconds(offsetMs: number): string {
-  const sign = offsetMs < 0 ? '\u2212' : '+';
-  const seconds = Math.abs(offsetMs) / 1000;
-  if (seconds < 60) return `${sign}${withUnit(seconds, 's', 1)}`;
-  if (seconds < 7200) {
-    return `${sign}${withUnit(Math.floor(seconds / 60), 'min')} ${withUnit(Math.round(seconds % 60), 's')}`;
-  }
-  return `${sign}${withUnit(seconds / 3600, 'h', 1)}`;
+/** "40 ms", "0.3 s", "3 min 12 s", "2.5 h". */
+function lengthWords(offsetMs: number): string {
+  const lengthMs = Math.abs(offsetMs);
+  if (lengthMs < 100) return withUnit(lengthMs, 'ms');
+  const wholeS = Math.round(lengthMs / 1000);
+  if (wholeS < 60) return withUnit(lengthMs / 1000, 's', 1);
+  if (wholeS < 7200) return `${withUnit(Math.floor(wholeS / 60), 'min')} ${withUnit(wholeS % 60, 's')}`;
+  return withUnit(wholeS / 3600, 'h', 1);
 }
 
 /** On what the corrected frequency rests. */
