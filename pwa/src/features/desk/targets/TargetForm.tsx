@@ -66,12 +66,6 @@ type TargetFieldsProps = {
 };
 
 function TargetFields({ errors, values, set, frequency, onFrequency }: TargetFieldsProps) {
-  const setPoint = (change: { latDeg?: number | null; lonDeg?: number | null }): void => {
-    const point = { latDeg: values.tx?.latDeg ?? null, lonDeg: values.tx?.lonDeg ?? null, ...change };
-    const isEmpty = point.latDeg === null && point.lonDeg === null;
-    set({ tx: isEmpty ? null : { latDeg: point.latDeg ?? Number.NaN, lonDeg: point.lonDeg ?? Number.NaN } });
-  };
-
   const orNull = (text: string) => (text === '' ? null : text);
   return (
     <>
@@ -102,23 +96,7 @@ function TargetFields({ errors, values, set, frequency, onFrequency }: TargetFie
         onChange={(mode) => set({ mode })}
       />
       <ScheduleField errors={errors} schedule={values.schedule} onChange={(schedule) => set({ schedule })} />
-      <NumberField
-        {...errors.field('tx.latDeg')}
-        label="Transmitter latitude"
-        unit="°"
-        signed
-        value={values.tx?.latDeg ?? null}
-        onChange={(latDeg) => setPoint({ latDeg })}
-      />
-      <NumberField
-        {...errors.field('tx.lonDeg')}
-        label="Transmitter longitude"
-        unit="°"
-        signed
-        hint="East is positive"
-        value={values.tx?.lonDeg ?? null}
-        onChange={(lonDeg) => setPoint({ lonDeg })}
-      />
+      <TransmitterFields errors={errors} tx={values.tx} onTx={(point) => set({ tx: point })} />
       <NumberField
         {...errors.field('powerKw')}
         label="Power"
@@ -143,6 +121,46 @@ function TargetFields({ errors, values, set, frequency, onFrequency }: TargetFie
       />
     </>
   );
+}
+
+type TransmitterFieldsProps = {
+  readonly errors: FormErrors;
+  readonly tx: Target['tx'];
+  readonly onTx: (tx: Target['tx']) => void;
+};
+
+/** Both figures or none; one alone becomes no number, which the schema refuses by name. */
+function TransmitterFields({ errors, tx, onTx }: TransmitterFieldsProps) {
+  const setPoint = (change: { latDeg?: number | null; lonDeg?: number | null }): void => {
+    const point = { latDeg: tx?.latDeg ?? null, lonDeg: tx?.lonDeg ?? null, ...change };
+    const isEmpty = isNothing(point.latDeg) && isNothing(point.lonDeg);
+    onTx(isEmpty ? null : { latDeg: point.latDeg ?? Number.NaN, lonDeg: point.lonDeg ?? Number.NaN });
+  };
+  return (
+    <>
+      <NumberField
+        {...errors.field('tx.latDeg')}
+        label="Transmitter latitude"
+        unit="°"
+        signed
+        value={tx?.latDeg ?? null}
+        onChange={(latDeg) => setPoint({ latDeg })}
+      />
+      <NumberField
+        {...errors.field('tx.lonDeg')}
+        label="Transmitter longitude"
+        unit="°"
+        signed
+        hint="East is positive"
+        value={tx?.lonDeg ?? null}
+        onChange={(lonDeg) => setPoint({ lonDeg })}
+      />
+    </>
+  );
+}
+
+function isNothing(figure: number | null): boolean {
+  return figure === null || Number.isNaN(figure);
 }
 
 function newTarget(listId: string): Target {
