@@ -27,7 +27,7 @@ export function MapLayers({ squares, measure, nightAtMs, marks, zoom, onZoom, on
   const map = useMap();
   const theme = useTheme();
   const palette = useMemo(() => readPalette(theme), [theme]);
-  const { land } = useLand(zoom);
+  const land = useLand(zoom);
   const night = useMemo(() => (nightAtMs === null ? null : nightAt(nightAtMs)), [nightAtMs]);
   const shapes = useMemo(() => squareShapes(squares, measure), [squares, measure]);
   const ground = useMapCanvas('coverage-ground', 210);

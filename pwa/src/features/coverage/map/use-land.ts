@@ -1,19 +1,16 @@
 import { useEffect, useState } from 'react';
 import { FINE_LAND_ZOOM, loadLand, type Land } from './land';
 
-export type LandState = { readonly land: Land | null; readonly isMissing: boolean };
-
-/** The outlines for a zoom: the coarse ones at once, the fine ones where they are kept or can be fetched. */
-export function useLand(zoom: number): LandState {
+/** The outlines for a zoom: the coarse ones at once, the fine ones where they are kept or can be fetched. Null for none. */
+export function useLand(zoom: number): Land | null {
   const [coarse, setCoarse] = useState<Land | null>(null);
   const [fine, setFine] = useState<Land | null>(null);
-  const [isMissing, setMissing] = useState(false);
   const wantsFine = zoom >= FINE_LAND_ZOOM;
   useEffect(() => {
     let isWanted = true;
     loadLand('coarse').then(
       (land) => isWanted && setCoarse(land),
-      () => isWanted && setMissing(true),
+      (error: unknown) => console.error('the map has no outlines', error),
     );
     return () => {
       isWanted = false;
@@ -31,5 +28,5 @@ export function useLand(zoom: number): LandState {
       isWanted = false;
     };
   }, [wantsFine]);
-  return { land: wantsFine ? (fine ?? coarse) : coarse, isMissing };
+  return wantsFine ? (fine ?? coarse) : coarse;
 }
