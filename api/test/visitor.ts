@@ -60,10 +60,10 @@ export class Visitor {
   }
 
   private keepCookie(setCookies: string[]): void {
-    const refresh = setCookies.find((line) => line.startsWith('harkmoor_refresh='));
+    const refresh = setCookies.find((line) => line.startsWith('harkmoor_refresh_'));
     if (!refresh) return;
     const value = refresh.split(';', 1)[0]!;
-    this.cookie = value === 'harkmoor_refresh=' ? null : value;
+    this.cookie = value.endsWith('=') ? null : value;
   }
 }
 

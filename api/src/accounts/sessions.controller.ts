@@ -50,11 +50,11 @@ export class SessionsController {
     @Req() request: Request,
     @Res({ passthrough: true }) response: Response,
   ): Promise<SignedInAnswer> {
-    const token = refreshTokenOf(request);
+    const token = refreshTokenOf(request, this.configuration);
     const session = token
       ? await this.sessions.refresh(token)
       : new Refusal('unauthenticated', 'This device is not signed in.');
-    if (session instanceof Refusal) clearRefreshCookie(response, this.configuration.isHttps);
+    if (session instanceof Refusal) clearRefreshCookie(response, this.configuration);
     return this.answer(granted(session), response);
   }
 
@@ -68,15 +68,15 @@ export class SessionsController {
     @Req() request: Request,
     @Res({ passthrough: true }) response: Response,
   ): Promise<void> {
-    const token = refreshTokenOf(request);
+    const token = refreshTokenOf(request, this.configuration);
     if (token) await this.sessions.signOut(token);
-    clearRefreshCookie(response, this.configuration.isHttps);
+    clearRefreshCookie(response, this.configuration);
   }
 
   private async answer(session: OpenSession, response: Response): Promise<SignedInAnswer> {
     const { accountId, sessionId, refreshToken } = session;
     const { account, clubs } = await this.whoAmI.of(accountId);
-    setRefreshCookie(response, refreshToken, this.configuration.isHttps);
+    setRefreshCookie(response, refreshToken, this.configuration);
     return { accessToken: this.whoAmI.accessToken(accountId, sessionId), account, clubs };
   }
 }

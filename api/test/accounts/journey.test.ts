@@ -29,7 +29,7 @@ test('should lead from sign-up by mail to a signed-in device and out again', asy
   expect(clubs).toEqual([{ clubId: expect.any(String) as string, role: 'admin', card }]);
   const cookie = first.headers.getSetCookie()[0]!;
   expect(cookie).toMatch(
-    /^harkmoor_refresh=[\w-]{43}; Max-Age=\d+; Path=\/api\/accounts; Expires=[^;]+; HttpOnly; SameSite=Strict$/,
+    /^harkmoor_refresh_80=[\w-]{43}; Max-Age=\d+; Path=\/api\/accounts; Expires=[^;]+; HttpOnly; SameSite=Strict$/,
   );
 
   const token = linkTokenOf(await mail.mailTo('signe.lyng@harkmoor.test'), '/account/confirm');
@@ -55,8 +55,28 @@ test('should make the cookie secure where people come by https', async () => {
   await visitor.post('/api/accounts/sign-up', signUp);
   const { headers } = await visitor.signIn('signe.lyng@harkmoor.test', PASSWORD);
   await secure.close();
-  expect(headers.getSetCookie()[0]).toContain('; Secure');
+  expect(headers.getSetCookie()[0]).toMatch(/^harkmoor_refresh_443=.*; Secure/);
   expect(headers.get('strict-transport-security')).toBe('max-age=31536000; includeSubDomains');
+});
+
+test('should stay signed in beside another server on the same host', async () => {
+  const [here, beside] = await Promise.all(
+    ['http://harkmoor.test:3000', 'http://harkmoor.test:3100'].map((PUBLIC_URL) => makeApp({ PUBLIC_URL })),
+  );
+  // one browser, one host: it sends the cookies of both to each
+  const jar: string[] = [];
+  for (const { url } of [here!, beside!]) {
+    const visitor = new Visitor(url);
+    await visitor.post('/api/accounts/sign-up', signUp);
+    await visitor.signIn('signe.lyng@harkmoor.test', PASSWORD);
+    jar.push(visitor.cookie!);
+  }
+  expect(new Set(jar.map((cookie) => cookie.split('=')[0])).size).toBe(2);
+  for (const { url } of [here!, beside!]) {
+    const headers = { Cookie: jar.join('; ') };
+    expect((await new Visitor(url).post('/api/accounts/refresh', {}, { headers })).status).toBe(200);
+  }
+  await Promise.all([here!.close(), beside!.close()]);
 });
 
 test('should refuse a confirming link after 48 hours and send a new one when asked', async () => {

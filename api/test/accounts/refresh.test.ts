@@ -101,11 +101,11 @@ test('should keep no token in the database, only hashes', async () => {
 });
 
 test('should refuse invented and missing tokens, and take the cookie away', async () => {
-  expect(await refreshWith(`harkmoor_refresh=${'A'.repeat(43)}`)).toBeNull();
+  expect(await refreshWith(`harkmoor_refresh_80=${'A'.repeat(43)}`)).toBeNull();
   const { status, body, headers } = await new Visitor(server.url).post('/api/accounts/refresh');
   expect([status, body.code]).toEqual([401, 'unauthenticated']);
   expect(headers.getSetCookie()[0]).toMatch(
-    /^harkmoor_refresh=; Path=\/api\/accounts; Expires=Thu, 01 Jan 1970/,
+    /^harkmoor_refresh_80=; Path=\/api\/accounts; Expires=Thu, 01 Jan 1970/,
   );
 });
 

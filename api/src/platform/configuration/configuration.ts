@@ -12,7 +12,7 @@ const environmentSchema = z.object({
   JWT_SECRET: z.string().min(32),
   MAIL_URL: z.url({ protocol: /^smtps?$/ }),
   MAIL_FROM: z.string().min(3).max(200).default('Harkmoor <harkmoor@localhost>'),
-  /** Where people open the application: links in mails begin with it, and https makes cookies secure. */
+  /** Where people open the application: links in mails begin with it, and https makes cookies secure; its port names the cookie. */
   PUBLIC_URL: z.url({ protocol: /^https?$/ }),
   PWA_DIR: z.string().min(1).optional(),
   LOG_LEVEL: z.enum(['silent', 'fatal', 'error', 'warn', 'info', 'debug']).default('info'),
@@ -67,6 +67,12 @@ export class Configuration {
 
   get isHttps(): boolean {
     return this.publicUrl.startsWith('https:');
+  }
+
+  /** The port that people's browsers see, also where the address leaves it out. */
+  get publicPort(): number {
+    const { port } = new URL(this.publicUrl);
+    return port === '' ? (this.isHttps ? 443 : 80) : Number(port);
   }
 }
 
