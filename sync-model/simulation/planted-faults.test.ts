@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { runFleet } from './fleet.js';
 import { PLANTED_FAULTS } from './planted-faults.js';
 
-const SEEDS_MAX = 300;
+const SEEDS_MAX = 1000;
 
 describe('the simulation', () => {
   it.each(PLANTED_FAULTS)('should find that $name', { timeout: 600_000 }, async (fault) => {

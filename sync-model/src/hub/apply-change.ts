@@ -33,7 +33,10 @@ function makeNew(set: WorkingSet, writer: Writer, { key, state, base }: CheckedC
   if (refusal) return refused(refusal);
   const needs = unknownParent(set, key, state.fields);
   if (needs !== null) return { status: 'held', needs };
-  set.put({ ...key, ownerId: writer.accountId, seq: 0, ...mergeRecord(state, state) }, true);
+  // one stamp for all fields is the form that a merge gives already; of several, the earliest becomes `at`
+  const { at, fields } = state;
+  const merged = state.stamps ? mergeRecord(state, state) : { at, fields };
+  set.put({ ...key, ownerId: writer.accountId, seq: 0, ...merged }, true);
   return APPLIED;
 }
 
@@ -54,7 +57,7 @@ function changeStored(
   if (needs !== null) return { status: 'held', needs };
   const merged = mergeRecord(stored, news);
   set.addRows(key, replacedValues(stored, news, base));
-  if (sameValue(registersOf(merged), registersOf(stored))) set.markDifferent(key);
+  if (isUnchanged(stored, merged, Object.keys(news.fields))) set.markDifferent(key);
   else set.merged(key, merged, holdsAll(merged, state));
   return APPLIED;
 }
@@ -78,8 +81,14 @@ function holdsAll(record: RecordState, change: RecordState): boolean {
   return Object.keys(change.fields).every((field) => stampOf(record, field) === stampOf(change, field));
 }
 
-function registersOf(state: RecordState): unknown {
-  return Object.keys(state.fields).map((field) => [field, state.fields[field], stampOf(state, field)]);
+/** Whether a merge left the fields that it could touch as they were. */
+function isUnchanged(stored: RecordState, merged: RecordState, fields: readonly string[]): boolean {
+  return fields.every(
+    (field) =>
+      field in stored.fields &&
+      stampOf(merged, field) === stampOf(stored, field) &&
+      sameValue(merged.fields[field], stored.fields[field]),
+  );
 }
 
 /** The writer's rights; a target that moves between lists needs those of both. */

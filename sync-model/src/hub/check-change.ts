@@ -2,7 +2,7 @@ import type { z } from 'zod';
 import type { RecordState } from '../merge/record-state.js';
 import type { Change, Refusal } from '../protocol/messages.js';
 import { CHANGE_BYTES_MAX } from '../protocol/limits.js';
-import { jsonBytes } from '../protocol/utf8-bytes.js';
+import { isWithinBytes } from '../protocol/utf8-bytes.js';
 import { FIELD_NAMES, withEmptyFields } from '../records/field-names.js';
 import { RECORD_SCHEMAS } from '../records/schemas.js';
 import type { Stamp } from '../stamp/stamp.js';
@@ -36,7 +36,7 @@ export function isRefusal(checked: CheckedChange | Refusal): checked is Refusal 
 }
 
 function limitsRefusal(change: Change): Refusal | null {
-  if (jsonBytes(change) <= CHANGE_BYTES_MAX) return null;
+  if (isWithinBytes(JSON.stringify(change), CHANGE_BYTES_MAX)) return null;
   return { code: 'too-large', message: 'This record is too large to be sent. Shorten its texts.' };
 }
 

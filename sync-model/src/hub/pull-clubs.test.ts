@@ -27,6 +27,19 @@ describe('a round that fetches', () => {
     expect(edited.records).toEqual([]);
   });
 
+  it('should be at the head after a push larger than a page, with nothing to fetch', async () => {
+    world = new QuietWorld({ changesPerRound: 10, changesPerTransaction: 2, recordsPerPage: 3 });
+    const answer = await push(world, [site(), ...gear(), reception()]);
+    expect(answer).toMatchObject({ records: [], cursor: 5, headSeq: 5, more: false });
+  });
+
+  it("should send another's record that stands before and between those of the caller", async () => {
+    await push(world, [site()], BO);
+    const answer = await push(world, [...gear(), reception()]);
+    expect(answer.records.map(({ id }) => id)).toEqual([SITE]);
+    expect(answer).toMatchObject({ cursor: 5, more: false });
+  });
+
   it('should send a record of this round where the caller does not hold the merged form', async () => {
     await push(world, [site()]);
     await push(world, [edit('site', SITE, { notes: 'theirs' }, at(5, 'phonea02'))], ANNA, 1);

@@ -30,7 +30,8 @@ export async function pullClubs(
       continue;
     }
     memberships.delete(request.clubId);
-    const page = await pageOf(snapshot, request, membership, budget);
+    const from = pastOwn(startOf(request, membership.club), pushed.get(request.clubId));
+    const page = await pageOf(snapshot, from, membership, budget);
     budget -= page.taken;
     clubs.push(answerOf(membership, page, pushed.get(request.clubId)));
   }
@@ -44,11 +45,10 @@ const UNASKED: Page = { records: [], cursor: 0, more: true, taken: 0 };
 
 async function pageOf(
   snapshot: HubSnapshot,
-  request: SyncClubRequest,
+  from: number,
   { clubId, club }: Membership,
   limit: number,
 ): Promise<Page> {
-  const from = startOf(request, club);
   if (limit === 0 || from === club.seq) return { records: [], cursor: from, more: from < club.seq, taken: 0 };
   const records = await snapshot.page(clubId, from, limit);
   const isLast = records.length < limit;
@@ -60,6 +60,18 @@ async function pageOf(
 function startOf(request: SyncClubRequest, club: HubClub): number {
   const isOtherHistory = request.historyId !== null && request.historyId !== club.historyId;
   return isOtherHistory || request.cursor > club.seq ? 0 : request.cursor;
+}
+
+/**
+ * Past what the caller wrote in this round right after its cursor: it holds those records, so they need not be
+ * read. A place in the feed belongs to one record for ever; one that was left since has nothing to send.
+ */
+function pastOwn(from: number, pushed: PushedClub | undefined): number {
+  if (!pushed) return from;
+  const own = new Set(pushed.heldByCaller.values());
+  let last = from;
+  while (own.has(last + 1)) last += 1;
+  return last;
 }
 
 function answerOf(

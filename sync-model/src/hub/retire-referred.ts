@@ -22,16 +22,13 @@ export async function retireReferred(tx: HubWrite, set: WorkingSet, nowMs: numbe
 
 /** Deleted sites and gear that were changed here, or that a change of this transaction names. */
 function deletedCandidates(set: WorkingSet): HubRecord[] {
+  const deleted = set
+    .all()
+    .filter(({ type, fields }) => fields.deleted === true && RETIRABLE_TYPES.includes(type));
+  if (deleted.length === 0) return [];
   const changed = set.changed();
   const concerned = new Set([...changed.map(keyText), ...namedParents(changed)]);
-  return set
-    .all()
-    .filter(
-      (record) =>
-        RETIRABLE_TYPES.includes(record.type) &&
-        record.fields.deleted === true &&
-        concerned.has(keyText(record)),
-    );
+  return deleted.filter((record) => concerned.has(keyText(record)));
 }
 
 function namedParents(records: readonly HubRecord[]): string[] {

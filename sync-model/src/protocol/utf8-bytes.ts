@@ -13,6 +13,11 @@ export function utf8Bytes(text: string): number {
   return bytes;
 }
 
+/** Whether a text is at most so long as UTF-8. No unit takes more than three bytes, so a short one is not counted. */
+export function isWithinBytes(text: string, bytesMax: number): boolean {
+  return text.length * 3 <= bytesMax || utf8Bytes(text) <= bytesMax;
+}
+
 /** Bytes of a value as JSON on the wire. */
 export function jsonBytes(value: unknown): number {
   return utf8Bytes(JSON.stringify(value) ?? '');

@@ -127,7 +127,7 @@ export function withEmptyFields(
   type: WritableType,
   fields: Readonly<Record<string, unknown>>,
 ): Record<string, unknown> {
-  return Object.fromEntries(
-    FIELD_NAMES[type].map((name) => [name, fields[name] ?? (name === 'deleted' ? false : null)]),
-  );
+  const whole: Record<string, unknown> = {};
+  for (const name of FIELD_NAMES[type]) whole[name] = fields[name] ?? (name === 'deleted' ? false : null);
+  return whole;
 }

@@ -91,9 +91,11 @@ export function parentsOf(
   type: WritableType,
   fields: Readonly<Record<string, unknown>>,
 ): { type: WritableType; id: string }[] {
-  return PARENT_FIELDS[type].flatMap(({ field, type: parentType, many }) => {
-    const value = fields[field];
-    const ids = many ? (Array.isArray(value) ? value : []) : [value];
-    return ids.filter((id): id is string => typeof id === 'string').map((id) => ({ type: parentType, id }));
-  });
+  const parents: { type: WritableType; id: string }[] = [];
+  for (const { field, type: parentType, many } of PARENT_FIELDS[type]) {
+    const value: unknown = fields[field];
+    const ids: readonly unknown[] = many && Array.isArray(value) ? value : [many ? null : value];
+    for (const id of ids) if (typeof id === 'string') parents.push({ type: parentType, id });
+  }
+  return parents;
 }
