@@ -30,34 +30,32 @@ export function LogTable({ state, clubId, openId, rowTo }: LogTableProps) {
     rowCount: shownCount,
     scrollToPlace: (place) => virtual.scrollToIndex(lineOfPlace(heads, place)),
   });
-  const lines = items.map(({ index }) => ({ index, line: lineOf(index) }));
+  const lines = items.map(({ index, start }) => ({ index, start, line: lineOf(index) }));
   const places = lines.flatMap(({ line }) => (line.kind === 'row' ? [line.place] : []));
   const stop = places.includes(keys.active) ? keys.active : places[0];
-  const above = items[0]?.start ?? 0;
-  const below = virtual.getTotalSize() - (items.at(-1)?.end ?? 0);
   return (
     <div ref={scroller} className="log-scroll" onKeyDown={keys.onKeyDown}>
-      <table className="hm-table log-table" aria-rowcount={shownCount + heads.length + 1}>
+      <table role="table" className="hm-table log-table" aria-rowcount={shownCount + heads.length + 1}>
         <caption className="only-heard">Receptions, newest first</caption>
-        <thead>
-          <tr aria-rowindex={1}>
+        <thead role="rowgroup">
+          <tr role="row" aria-rowindex={1}>
             {COLUMNS.map((name) => (
-              <th key={name} scope="col">
+              <th key={name} role="columnheader" scope="col">
                 {name}
               </th>
             ))}
           </tr>
         </thead>
-        <tbody>
-          <Gap height={above} />
-          {lines.map(({ index, line }) =>
+        <tbody role="rowgroup" style={{ height: virtual.getTotalSize() }}>
+          {lines.map(({ index, start, line }) =>
             line.kind === 'head' ? (
-              <HeadRow key={index} head={line.head} rowIndex={index + 2} />
+              <HeadRow key={index} head={line.head} rowIndex={index + 2} startPx={start} />
             ) : (
               <Row
                 key={index}
                 row={state.rowAt(line.place)}
                 rowIndex={index + 2}
+                startPx={start}
                 clubId={clubId}
                 isOpen={state.rowAt(line.place)?.id === openId}
                 rowTo={rowTo}
@@ -67,27 +65,21 @@ export function LogTable({ state, clubId, openId, rowTo }: LogTableProps) {
               />
             ),
           )}
-          <Gap height={below} />
         </tbody>
       </table>
     </div>
   );
 }
 
-/** The room of the rows that are not drawn. */
-function Gap({ height }: { readonly height: number }) {
-  if (height <= 0) return null;
-  return (
-    <tr aria-hidden="true" className="log-gap">
-      <td colSpan={COLUMNS.length} style={{ height }} />
-    </tr>
-  );
-}
+/** Where a line stands: laid out by itself, so that what comes into sight moves no other row. */
+const placedAt = (startPx: number) => ({ transform: `translateY(${startPx}px)` });
 
-function HeadRow({ head, rowIndex }: { readonly head: GroupHead; readonly rowIndex: number }) {
+type HeadRowProps = { readonly head: GroupHead; readonly rowIndex: number; readonly startPx: number };
+
+function HeadRow({ head, rowIndex, startPx }: HeadRowProps) {
   return (
-    <tr aria-rowindex={rowIndex} className="log-head-row">
-      <th scope="rowgroup" colSpan={COLUMNS.length}>
+    <tr role="row" aria-rowindex={rowIndex} className="log-head-row" style={placedAt(startPx)}>
+      <th role="rowheader" scope="rowgroup" aria-colspan={COLUMNS.length} colSpan={COLUMNS.length}>
         {headText(head)} <span className="log-head-count num">{figureText(head.count)}</span>
       </th>
     </tr>
@@ -97,17 +89,20 @@ function HeadRow({ head, rowIndex }: { readonly head: GroupHead; readonly rowInd
 type RowProps = {
   readonly row: ShownRow | undefined;
   readonly rowIndex: number;
+  readonly startPx: number;
   readonly clubId: string;
   readonly isOpen: boolean;
   readonly rowTo: (id: string) => string;
 } & RowStop;
 
 /** Drawn again only where something of it changed: scrolling moves its neighbours and not itself. */
-const Row = memo(function Row({ row, rowIndex, clubId, isOpen, rowTo, ...stop }: RowProps) {
+const Row = memo(function Row({ row, rowIndex, startPx, clubId, isOpen, rowTo, ...stop }: RowProps) {
   if (!row) {
     return (
-      <tr aria-rowindex={rowIndex} className="log-table-row">
-        <td colSpan={COLUMNS.length}>…</td>
+      <tr role="row" aria-rowindex={rowIndex} className="log-table-row" style={placedAt(startPx)}>
+        <td role="cell" aria-colspan={COLUMNS.length} colSpan={COLUMNS.length}>
+          …
+        </td>
       </tr>
     );
   }
@@ -115,10 +110,12 @@ const Row = memo(function Row({ row, rowIndex, clubId, isOpen, rowTo, ...stop }:
   const time = utcHourMinute(row.deviceAt);
   return (
     <tr
+      role="row"
+      style={placedAt(startPx)}
       aria-rowindex={rowIndex}
       className={isOpen ? 'log-table-row hm-row-leads log-row-open' : 'log-table-row hm-row-leads'}
     >
-      <td className="num">
+      <td role="cell" className="num">
         <Link
           to={rowTo(row.id)}
           replace
@@ -129,11 +126,13 @@ const Row = memo(function Row({ row, rowIndex, clubId, isOpen, rowTo, ...stop }:
           {time}
         </Link>
       </td>
-      <td className="num log-table-frequency">{`${figure}${THIN_SPACE}${unit}`}</td>
-      <td>{row.station}</td>
-      <td className="num log-table-outcome">{outcomeText(row)}</td>
-      <td>{row.antenna}</td>
-      <td>
+      <td role="cell" className="num log-table-frequency">{`${figure}${THIN_SPACE}${unit}`}</td>
+      <td role="cell">{row.station}</td>
+      <td role="cell" className="num log-table-outcome">
+        {outcomeText(row)}
+      </td>
+      <td role="cell">{row.antenna}</td>
+      <td role="cell">
         {row.isClash ? <ClashMark /> : null}
         <RowState row={row} clubId={clubId} />
       </td>
