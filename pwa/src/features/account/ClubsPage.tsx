@@ -1,6 +1,7 @@
 import { useIonRouter } from '@ionic/react';
 import { useState } from 'react';
 import { ButtonLink } from '../../design/button/ButtonLink';
+import type { FieldFault } from '../../design/form/use-form-errors';
 import { SelectField } from '../../design/form/SelectField';
 import { TextField } from '../../design/form/TextField';
 import { Section } from '../../design/layout/Section';
@@ -58,8 +59,7 @@ function JoinForm() {
   async function submit(): Promise<void> {
     if (view.kind !== 'account') return;
     const plain = code.replace(/[\s-]/g, '').toUpperCase();
-    const faults = plain === '' ? [{ field: 'code', message: 'Write the code that an admin gave you' }] : [];
-    if (await request.ask(faults, () => joinClub(plain, view.log, view.actions))) entered();
+    if (await request.ask(codeFaults(plain), () => joinClub(plain, view.log, view.actions))) entered();
   }
   return (
     <Section title="Join by code">
@@ -77,6 +77,13 @@ function JoinForm() {
       </FormFrame>
     </Section>
   );
+}
+
+function codeFaults(plain: string): FieldFault[] {
+  if (/^[0-9A-Z]{10}$/.test(plain)) return [];
+  const message =
+    plain === '' ? 'Write the code that an admin gave you' : 'A code has 10 letters and figures';
+  return [{ field: 'code', message }];
 }
 
 function FoundForm() {
