@@ -92,4 +92,9 @@ describe('how much of a place is offered to be shared', () => {
   ] as const)('should be, home %s in a %s environment, %i characters', (home, environment, characters) => {
     expect(defaultShareCharacters({ home, environment })).toBe(characters);
   });
+
+  it('should offer no square finer than the fix is good for', () => {
+    expect(defaultShareCharacters({ home: false, environment: 'rural', accuracyM: 69_000 })).toBe(4);
+    expect(defaultShareCharacters({ home: false, environment: 'rural', accuracyM: 40 })).toBe(6);
+  });
 });

@@ -40,10 +40,21 @@ export function placeFromFix(fix: Position, characters: ShareCharacters | 'exact
   return { locator: locatorOf(fix, characters) };
 }
 
-/** Four characters for a home or where people live close together, else six: what is offered, not what is forced. */
-export function defaultShareCharacters(site: { home: boolean; environment: Site['environment'] }): 4 | 6 {
+/** Half the diagonal of a six-character square on the equator, rounded down: 2.5 by 5 minutes of arc. */
+const SIX_CHARACTERS_ACCURACY_M = 5000;
+
+/**
+ * Four characters for a home, where people live close together, or where the fix is no better than the larger
+ * square; else six. What is offered, not what is forced.
+ */
+export function defaultShareCharacters(site: {
+  home: boolean;
+  environment: Site['environment'];
+  accuracyM?: number;
+}): 4 | 6 {
   const amongHouses = site.environment === 'city' || site.environment === 'residential';
-  return site.home || amongHouses ? 4 : 6;
+  const isCoarse = (site.accuracyM ?? 0) > SIX_CHARACTERS_ACCURACY_M;
+  return site.home || amongHouses || isCoarse ? 4 : 6;
 }
 
 function rounded(value: number, step: number): number {

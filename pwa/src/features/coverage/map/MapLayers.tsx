@@ -1,15 +1,15 @@
-import { useEffect, useMemo, useState } from 'react';
+import { useEffect, useMemo } from 'react';
 import { useMap, useMapEvents } from 'react-leaflet';
 import { useTheme } from '../../../design/theme/theme';
 import type { SquareFigures } from '../answers/questions';
 import type { Measure } from '../view/coverage-view';
-import { addMapCanvas, type MapCanvas } from './map-canvas';
+import { useMapCanvas } from '../../../design/map/use-map-canvas';
 import { nightAt, paintNight } from './night';
-import { paintLand } from './paint-land';
+import { paintLand } from '../../../design/map/paint-land';
 import { paintMarks, paintSquares, type Marks } from './paint-squares';
-import { readPalette } from './palette';
+import { readPalette } from '../../../design/map/palette';
 import { squareShapes } from './square-shapes';
-import { useLand } from './use-land';
+import { useLand } from '../../../design/map/use-land';
 
 export type MapLayersProps = {
   readonly squares: readonly SquareFigures[];
@@ -54,15 +54,4 @@ export function MapLayers({ squares, measure, nightAtMs, marks, zoom, onZoom, on
     mousemove: ({ latlng }) => onPoint({ latDeg: latlng.lat, lonDeg: latlng.lng }, false),
   });
   return null;
-}
-
-function useMapCanvas(name: string, zIndex: number): MapCanvas | null {
-  const map = useMap();
-  const [canvas, setCanvas] = useState<MapCanvas | null>(null);
-  useEffect(() => {
-    const made = addMapCanvas(map, name, zIndex);
-    setCanvas(made);
-    return () => made.remove();
-  }, [map, name, zIndex]);
-  return canvas;
 }

@@ -4,9 +4,9 @@ import { isAllHours, middleOfDayMs } from '../view/hour-range';
 import { middleDayMs } from '../view/months';
 import { shownMonths } from '../view/scope-words';
 import type { CoverageView } from '../view/coverage-view';
-import { worldCopies, type CanvasView } from './canvas-view';
-import { worldX, worldY, type WorldPoint } from './mercator';
-import type { MapPalette } from './palette';
+import { worldCopies, type CanvasView } from '../../../design/map/canvas-view';
+import { worldX, worldY, type WorldPoint } from '../../../design/map/mercator';
+import type { MapPalette } from '../../../design/map/palette';
 
 const STEP_DEG = 1;
 

@@ -1,7 +1,7 @@
 import { rampOf, textOnRamp } from '../../../design/scale/cividis';
-import { isInView, rectPx, worldCopies, type CanvasView } from './canvas-view';
-import type { WorldRect } from './mercator';
-import type { MapPalette } from './palette';
+import { isInView, rectPx, worldCopies, type CanvasView } from '../../../design/map/canvas-view';
+import type { WorldRect } from '../../../design/map/mercator';
+import type { MapPalette } from '../../../design/map/palette';
 import { rectOf, type SquareShape } from './square-shapes';
 
 /** The share of a thin square's sides that is left blank at each edge. */

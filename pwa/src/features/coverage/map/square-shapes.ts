@@ -2,7 +2,7 @@ import { locatorOf, squareOf } from '@harkmoor/sync-model/radio/locator/locator'
 import type { SquareCharacters } from '@harkmoor/sync-model/evidence/squares';
 import type { SquareFigures } from '../answers/questions';
 import type { Measure } from '../view/coverage-view';
-import { MAP_LAT_MAX_DEG, worldX, worldY, type WorldRect } from './mercator';
+import { MAP_LAT_MAX_DEG, worldX, worldY, type WorldRect } from '../../../design/map/mercator';
 import { fillOf, largestCount, type Fill } from './square-scale';
 
 /** A square ready to be painted. */

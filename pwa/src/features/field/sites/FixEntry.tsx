@@ -1,9 +1,12 @@
-import { useState } from 'react';
+import { lazy, Suspense, useState } from 'react';
 import { Button } from '../../../design/button/Button';
 import { averagePosition, readPosition, type PositionAnswer } from '../../../platform/position';
 import { fixFromLocator, type OwnFix } from '../data/site-record';
 import { LocatorKeys } from '../ui/LocatorKeys';
 import { fixText } from './site-words';
+
+/** The map comes only when it is asked for. */
+const PointMap = lazy(() => import('./PointMap').then((m) => ({ default: m.PointMap })));
 
 const READ_LIMIT_MS = 20_000;
 const AVERAGE_MS = 30_000;
@@ -62,6 +65,13 @@ export function FixEntry({ fix, error, onFix }: FixEntryProps) {
         </Button>
         <Button
           look="outline"
+          aria-expanded={way === 'map'}
+          onClick={() => setWay(way === 'map' ? 'position' : 'map')}
+        >
+          On the map
+        </Button>
+        <Button
+          look="outline"
           aria-expanded={way === 'locator'}
           onClick={() => setWay(way === 'locator' ? 'position' : 'locator')}
         >
@@ -69,6 +79,14 @@ export function FixEntry({ fix, error, onFix }: FixEntryProps) {
         </Button>
       </div>
       {way === 'locator' ? <LocatorKeys text={locator} onText={type} /> : null}
+      {way === 'map' ? (
+        <Suspense fallback={null}>
+          <PointMap
+            point={fix}
+            onPoint={(point, accuracyM) => onFix({ ...point, accuracyM, source: 'map', fixedAt: Date.now() })}
+          />
+        </Suspense>
+      ) : null}
     </section>
   );
 }

@@ -1,18 +1,16 @@
 import { useIonRouter } from '@ionic/react';
-import { defaultShareCharacters, placeFromFix } from '@harkmoor/sync-model/radio/path/shared-path';
+import { placeFromFix } from '@harkmoor/sync-model/radio/path/shared-path';
 import { ENVIRONMENTS, siteSchema } from '@harkmoor/sync-model/records/site';
 import { siteFixSchema } from '@harkmoor/sync-model/records/site-fix';
-import { useEffect, useState, type FormEvent } from 'react';
+import type { FormEvent } from 'react';
 import { Button } from '../../../design/button/Button';
 import { ChoiceChips } from '../../../design/choice/ChoiceChips';
 import { ErrorSummary } from '../../../design/form/ErrorSummary';
 import { NumberField } from '../../../design/form/NumberField';
 import { TextField } from '../../../design/form/TextField';
 import { ToggleField } from '../../../design/form/ToggleField';
-import { useFormErrors } from '../../../design/form/use-form-errors';
 import { paths } from '../../../platform/paths';
 import { schemaFaults, type SchemaFault } from '../../../platform/schema-faults';
-import { registerUnsavedWork } from '../../../platform/unsaved-work';
 import {
   putSiteAway,
   takeSiteBack,
@@ -23,6 +21,7 @@ import {
 import { FixEntry } from './FixEntry';
 import { SharedPlaceField } from './SharedPlaceField';
 import { ENVIRONMENT_WORDS } from './site-words';
+import { useSiteForm } from './use-site-form';
 import './sites.css';
 
 const SURROUNDINGS = ENVIRONMENTS.map((value) => ({ value, label: ENVIRONMENT_WORDS[value] }));
@@ -31,22 +30,8 @@ const SURROUNDINGS = ENVIRONMENTS.map((value) => ({ value, label: ENVIRONMENT_WO
 export function SiteForm({ view }: { readonly view: SiteView | null }) {
   const saveSite = useSaveSite();
   const router = useIonRouter();
-  const errors = useFormErrors();
-  const [values, setValues] = useState<Values>(() => startValues(view));
-  const [isShareChosen, setShareChosen] = useState(view !== null);
-  const [isDirty, setDirty] = useState(false);
-  useEffect(() => (isDirty ? registerUnsavedWork() : undefined), [isDirty]);
-
-  const set = (change: Partial<Values>): void => {
-    setDirty(true);
-    for (const field of Object.keys(change)) errors.mended(field);
-    setValues((before) => {
-      const next = { ...before, ...change };
-      return isShareChosen || change.shared !== undefined
-        ? next
-        : { ...next, shared: defaultShareCharacters(next) };
-    });
-  };
+  const form = useSiteForm(view);
+  const { errors, values } = form;
   const leave = () => router.push(paths.sites(), 'back', 'pop');
 
   async function submit(event: FormEvent): Promise<void> {
@@ -55,18 +40,31 @@ export function SiteForm({ view }: { readonly view: SiteView | null }) {
     await saveSite(view?.site.id ?? null, { ...values, fix: values.fix });
     leave();
   }
-  const text = (name: keyof Values & string) => errors.field(name);
   return (
     <form ref={errors.ref} noValidate onSubmit={(event) => void submit(event)}>
+      <SiteFields form={form} />
+      <ErrorSummary form={errors} />
+      <Button type="submit" wide>
+        Save
+      </Button>
+      {view ? <PutAway view={view} leave={leave} /> : null}
+    </form>
+  );
+}
+
+function SiteFields({ form }: { readonly form: ReturnType<typeof useSiteForm> }) {
+  const { errors, values, set } = form;
+  return (
+    <>
       <TextField
-        {...text('name')}
+        {...errors.field('name')}
         label="Name"
         required
         maxLength={60}
         value={values.name}
         onChange={(name) => set({ name })}
       />
-      <FixEntry fix={values.fix} error={text('fix').error} onFix={(fix) => set({ fix })} />
+      <FixEntry fix={values.fix} error={errors.field('fix').error} onFix={(fix) => set({ fix })} />
       <ChoiceChips
         label="Noise surroundings"
         options={SURROUNDINGS}
@@ -80,14 +78,7 @@ export function SiteForm({ view }: { readonly view: SiteView | null }) {
         onChange={(home) => set({ home })}
       />
       {values.fix ? (
-        <SharedPlaceField
-          fix={values.fix}
-          shared={values.shared}
-          onShared={(shared) => {
-            setShareChosen(true);
-            set({ shared });
-          }}
-        />
+        <SharedPlaceField fix={values.fix} shared={values.shared} onShared={form.chooseShared} />
       ) : null}
       <ToggleField
         label="Others may start outings here"
@@ -95,7 +86,7 @@ export function SiteForm({ view }: { readonly view: SiteView | null }) {
         onChange={(sharedUse) => set({ sharedUse })}
       />
       <NumberField
-        {...text('elevationM')}
+        {...errors.field('elevationM')}
         label="Elevation"
         unit="m"
         signed
@@ -104,7 +95,7 @@ export function SiteForm({ view }: { readonly view: SiteView | null }) {
         onChange={(elevationM) => set({ elevationM })}
       />
       <TextField
-        {...text('notes')}
+        {...errors.field('notes')}
         label="Notes"
         hint="Others see them"
         lines={3}
@@ -112,12 +103,7 @@ export function SiteForm({ view }: { readonly view: SiteView | null }) {
         value={values.notes ?? ''}
         onChange={(notes) => set({ notes: notes === '' ? null : notes })}
       />
-      <ErrorSummary form={errors} />
-      <Button type="submit" wide>
-        Save
-      </Button>
-      {view ? <PutAway view={view} leave={leave} /> : null}
-    </form>
+    </>
   );
 }
 
@@ -134,33 +120,6 @@ function PutAway({ view, leave }: { readonly view: SiteView; readonly leave: () 
       {view.isUsed ? 'Retire this site: its evidence stays' : 'Move to the bin'}
     </Button>
   );
-}
-
-function startValues(view: SiteView | null): Values {
-  if (!view) {
-    const fresh = { environment: 'rural', home: false } as const;
-    return {
-      ...fresh,
-      name: '',
-      fix: null,
-      shared: defaultShareCharacters(fresh),
-      sharedUse: false,
-      elevationM: null,
-      notes: null,
-    };
-  }
-  const { fields } = view.site;
-  const shared = 'locator' in fields.place ? (fields.place.locator.length as 4 | 6 | 8) : 'exact';
-  return {
-    name: fields.name,
-    environment: fields.environment,
-    home: view.ownFix?.fields.home ?? false,
-    fix: view.ownFix?.fields.fix ?? null,
-    shared,
-    sharedUse: fields.sharedUse,
-    elevationM: view.ownFix?.fields.elevationM ?? null,
-    notes: fields.notes,
-  };
 }
 
 /** By the records' own schemas, so that nothing is saved that the server would refuse. */

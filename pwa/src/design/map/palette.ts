@@ -1,4 +1,4 @@
-import type { Theme } from '../../../design/theme/theme';
+import type { Theme } from '../theme/theme';
 
 /** The colours of the map as CSS colours, read from the tokens: a canvas knows no custom properties. */
 export type MapPalette = {

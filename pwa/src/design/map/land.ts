@@ -1,7 +1,7 @@
 import { feature } from 'topojson-client';
 import type { GeometryCollection, Topology } from 'topojson-specification';
 import type { Position } from 'geojson';
-import { LAND_COARSE_URL, LAND_FINE_URL } from '../../../platform/map-data';
+import { LAND_COARSE_URL, LAND_FINE_URL } from '../../platform/map-data';
 import { worldX, worldY, type WorldRect } from './mercator';
 import { unwrapRing } from './unwrap-ring';
 
