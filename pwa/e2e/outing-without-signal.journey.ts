@@ -27,7 +27,7 @@ describe('an outing without signal', () => {
 
     await phone.setSignal(false);
     await phone.open('/field');
-    await startByLocator(phone);
+    await field.startFirstOuting(phone.page, SQUARE, 'Wire');
     await firstRoundWithTheWire(phone);
     await mendAnEntry(phone);
     await phone.page.reload(); // still signed in, the outing still runs
@@ -42,13 +42,6 @@ describe('an outing without signal', () => {
     await othersSeeIt(await browser.device(), walker);
     expect(phone.faults).toEqual([]);
   });
-
-  async function startByLocator({ page }: Device): Promise<void> {
-    await field.typeLocator(page, SQUARE);
-    await page.getByRole('radio', { name: 'Wire' }).check({ force: true });
-    await page.getByRole('button', { name: 'Start the outing' }).click();
-    await page.getByRole('textbox', { name: /^Frequency in kHz/ }).waitFor();
-  }
 
   async function firstRoundWithTheWire({ page }: Device): Promise<void> {
     await field.logHeard(page, { kHz: String(HALF / 1000), scores: '44433' });

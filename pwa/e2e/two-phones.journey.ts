@@ -48,8 +48,7 @@ describe('two phones of one account with wrong clocks', () => {
   });
 
   async function logOne(phone: Device): Promise<void> {
-    await field.typeLocator(phone.page, 'JO46');
-    await phone.page.getByRole('button', { name: 'Start the outing' }).click();
+    await field.startFirstOuting(phone.page, 'JO46');
     await field.logHeard(phone.page, { kHz: '6070', scores: '44444' });
   }
 

@@ -22,8 +22,7 @@ describe('unsent records as a file', () => {
     await field.installed(phone);
     await phone.setSignal(false);
     await phone.open('/field');
-    await field.typeLocator(phone.page, 'JO46');
-    await phone.page.getByRole('button', { name: 'Start the outing' }).click();
+    await field.startFirstOuting(phone.page, 'JO46');
     await field.logHeard(phone.page, { kHz: '6070', scores: '44444' });
     const file = await keepFile(phone, path.join(folder(), 'unsent.json'));
 

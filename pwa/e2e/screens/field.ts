@@ -25,13 +25,20 @@ const SECOND_TAP_MS = 1_600;
 
 export type Entry = { readonly kHz: string; readonly scores?: string };
 
-/** From Field: opens *Other frequency* and types one. */
+/** Opens *Other frequency* where it is not open yet, and types one. */
 export async function enterFrequency(page: Page, kHz: string): Promise<void> {
-  const other = page.getByRole('link', { name: 'Other frequency, kHz' });
-  const field = page.getByRole('textbox', { name: /^Frequency in kHz/ });
-  await other.or(field).first().waitFor();
-  if (await other.isVisible()) await other.click();
-  await field.fill(kHz);
+  if (new URL(page.url()).pathname !== '/field/frequency') {
+    await page.getByRole('link', { name: 'Other frequency, kHz' }).click();
+  }
+  await page.getByRole('textbox', { name: /^Frequency in kHz/ }).fill(kHz);
+}
+
+/** Starts the first outing of an empty log with a locator; leads to the entry of a frequency. */
+export async function startFirstOuting(page: Page, locator: string, antenna = 'Whip'): Promise<void> {
+  await typeLocator(page, locator);
+  await page.getByRole('radio', { name: antenna }).check({ force: true });
+  await page.getByRole('button', { name: 'Start the outing' }).click();
+  await page.waitForURL('**/field/frequency');
 }
 
 /** A planned try that was heard, scored, and saved. */
