@@ -12,22 +12,9 @@ import { changeMembership, PHONES, startClubs } from './people.js';
 import { Phone } from './phone.js';
 import { randomFrom, type Random } from './random.js';
 import { noteRareAnswer, noteRareCommit, noteRareSave, type RareState } from './rare-states.js';
+import { ROUNDS_TO_QUIET_MAX, STEPS_ACTIVE, STEPS_TO_REST_MAX, TURNS_MAX } from './run-limits.js';
+import type { RunResult } from './run-result.js';
 import { Scheduler, settled } from './scheduler.js';
-
-export type RunResult = {
-  readonly seed: number;
-  readonly violations: readonly Violation[];
-  readonly reached: ReadonlySet<RareState>;
-  readonly traceHash: string;
-  readonly steps: number;
-};
-
-/** With one change a round and two records a page, a good hundred records need this many. */
-const ROUNDS_TO_QUIET_MAX = 80;
-const STEPS_ACTIVE = 330;
-/** Against a standstill: far more than any run needs. */
-const TURNS_MAX = 10_000;
-const STEPS_TO_REST_MAX = 50_000;
 
 /** Runs one fleet: three phones, a hub, a bad network, wrong clocks and crashes, all from one seed. */
 export async function runFleet(seed: number, fault: PlantedFault | null = null): Promise<RunResult> {

@@ -1,4 +1,5 @@
-import { runFleet, type RunResult } from './fleet.js';
+import { runFleet } from './fleet.js';
+import type { RunResult } from './run-result.js';
 
 export type SeedsReport = {
   /** One text for each seed that broke a promise, with how to replay it; the first three at most. */

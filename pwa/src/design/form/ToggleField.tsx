@@ -1,4 +1,5 @@
 import { useId } from 'react';
+import './toggle.css';
 import { describedBy, FieldNotes, type FieldProps } from './field-parts';
 
 type ToggleFieldProps = Omit<FieldProps, 'required'> & {
