@@ -22,6 +22,7 @@ import type { Query } from './sql-session.js';
 import type { SyncFeatures } from './sync-features.js';
 
 type StoredRow = {
+  type: WritableType;
   id: string;
   owner_id: string;
   seq: string;
@@ -47,11 +48,13 @@ export class PostgresHubWrite implements HubWrite {
   }
 
   async records(keys: readonly HubKey[]): Promise<(HubRecord | undefined)[]> {
-    const found = new Map<string, HubRecord>();
-    for (const [type, ids] of idsByType(keys)) {
-      const rows = await this.query<StoredRow>(readStatement(this.features.table(type)), [this.clubId, ids]);
-      for (const row of rows) found.set(`${type} ${row.id}`, hubRecord(type, row));
-    }
+    const tables = this.features.allTables();
+    const ids = idsByType(keys);
+    const rows = await this.query<StoredRow>(readStatement(tables), [
+      this.clubId,
+      ...tables.map(({ type }) => ids.get(type) ?? []),
+    ]);
+    const found = new Map(rows.map((row) => [`${row.type} ${row.id}`, hubRecord(row)]));
     return keys.map(({ type, id }) => found.get(`${type} ${id}`));
   }
 
@@ -97,8 +100,8 @@ function idsByType(keys: readonly HubKey[]): Map<WritableType, string[]> {
   return groups;
 }
 
-function hubRecord(type: WritableType, row: StoredRow): HubRecord {
-  const { id, owner_id, seq, stamp, stamps, fields } = row;
+function hubRecord(row: StoredRow): HubRecord {
+  const { type, id, owner_id, seq, stamp, stamps, fields } = row;
   const record = { type, id, ownerId: owner_id, seq: Number(seq), at: stamp, fields };
   return stamps ? { ...record, stamps } : record;
 }

@@ -11,13 +11,16 @@ const OWN_COLUMNS = [
   ['stamps', 'jsonb'],
 ] as const;
 
-/** `$1` club, `$2` ids. */
-export function readStatement(table: RecordTable): Statement {
-  return {
-    name: `sync-read-${table.type}`,
-    text: `select id, owner_id, seq, stamp, stamps, ${fieldsJson(table)} as fields
-      from ${quoted(table.table)} where club_id = $1 and id = any($2::uuid[])`,
-  };
+/** `$1` club, then a list of ids for each table in their order: all that a transaction reads, in one question. */
+export function readStatement(tables: readonly RecordTable[]): Statement {
+  const reads = tables.map(
+    (
+      table,
+      index,
+    ) => `select '${table.type}' as type, id, owner_id, seq, stamp, stamps, ${fieldsJson(table)} as fields
+      from ${quoted(table.table)} where club_id = $1 and id = any($${index + 2}::uuid[])`,
+  );
+  return { name: 'sync-read', text: reads.join(' union all ') };
 }
 
 /** `$1` club, `$2` a JSON list of rows keyed by column: all rows of one type in one statement. */
