@@ -15,15 +15,24 @@ describe('the question "Still long wire?"', () => {
   const confirmed = { setupId: id(1), atMs: START, roundNo: 1 };
 
   it('should come at a new round, and thirty minutes after it was last answered', () => {
-    expect(isSetupQuestionDue(confirmed, { setupId: id(1), atMs: START + 60_000, roundNo: 1 })).toBe(false);
-    expect(isSetupQuestionDue(confirmed, { setupId: id(1), atMs: START + 60_000, roundNo: 2 })).toBe(true);
-    expect(
-      isSetupQuestionDue(confirmed, { setupId: id(1), atMs: START + SETUP_QUESTION_EVERY_MS, roundNo: 1 }),
-    ).toBe(true);
+    const now = { setupId: id(1), switchedAtMs: START, atMs: START + 60_000, roundNo: 1 };
+    expect(isSetupQuestionDue(confirmed, now)).toBe(false);
+    expect(isSetupQuestionDue(confirmed, { ...now, roundNo: 2 })).toBe(true);
+    expect(isSetupQuestionDue(confirmed, { ...now, atMs: START + SETUP_QUESTION_EVERY_MS })).toBe(true);
   });
 
   it('should not come about a setup that was just chosen', () => {
-    expect(isSetupQuestionDue(confirmed, { setupId: id(2), atMs: START + 9e6, roundNo: 4 })).toBe(false);
+    const now = { setupId: id(2), switchedAtMs: START + 9e6, atMs: START + 9e6, roundNo: 4 };
+    expect(isSetupQuestionDue(confirmed, now)).toBe(false);
+  });
+
+  it('should come thirty minutes after a switch that this phone does not remember', () => {
+    const now = { setupId: id(2), switchedAtMs: START + 9e6, atMs: START + 9e6, roundNo: 1 };
+    const later = { ...now, atMs: now.switchedAtMs + SETUP_QUESTION_EVERY_MS };
+    for (const remembered of [confirmed, null]) {
+      expect(isSetupQuestionDue(remembered, now)).toBe(false);
+      expect(isSetupQuestionDue(remembered, later)).toBe(true);
+    }
   });
 });
 

@@ -25,9 +25,11 @@ export function PadDetails({ form, base, setups, onBin }: PadDetailsProps) {
   const { values, change } = form;
   return (
     <>
-      <ModeChips mode={values.mode} onMode={(mode) => change({ mode })} />
+      <ModeChips mode={values.mode} onMode={form.changeMode} />
       <Parts form={form} />
-      <TimeMend atMs={values.atMs} tappedMs={base.deviceAt} onTime={(atMs) => change({ atMs })} />
+      <TimeMend
+        outcome={values.outcome}
+        atMs={values.atMs} tappedMs={base.deviceAt} onTime={(atMs) => change({ atMs })} />
       {values.isEdit ? <StoredParts form={form} setups={setups} /> : null}
       {values.isEdit ? null : <OutcomeChoice form={form} basis={base.basis} />}
       {onBin ? (
@@ -41,7 +43,7 @@ export function PadDetails({ form, base, setups, onBin }: PadDetailsProps) {
 
 function Parts({ form }: { readonly form: PadForm }) {
   const { values } = form;
-  const [open, setOpen] = useState<ReadonlySet<PartName>>(() => filledParts(values));
+  const [open, setOpen] = useState<ReadonlySet<PartName>>(() => filledParts(form));
   const isHeard = values.outcome === 'heard';
   const offersRst = isHeard && (RST_MODES.includes(values.mode) || open.has('rst'));
   const parts: [PartName, string, boolean][] = [
@@ -96,11 +98,11 @@ function StoredParts({ form, setups }: Pick<PadDetailsProps, 'form' | 'setups'>)
   );
 }
 
-function filledParts(values: PadForm['values']): Set<PartName> {
+function filledParts({ values, outlined }: PadForm): Set<PartName> {
   const parts = new Set<PartName>();
   if (values.remarks) parts.add('remark');
   if (values.programme.length > 0 || values.programmeText) parts.add('programme');
   if (values.stationName || values.identity === 'tentative') parts.add('station');
-  if (values.scores.rst) parts.add('rst');
+  if (Object.keys(values.rstParts).length > 0 || outlined.rst) parts.add('rst');
   return parts;
 }

@@ -26,14 +26,14 @@ const ALWAYS_ON = { kind: 'on', until: null } as const;
 
 /** The rows of the round, what was entered beside them, and the acts that close a round or the outing. */
 export function RoundPart({ field, touchRows, onEnd }: RoundPartProps) {
-  const { outing, frame, roundNo, round, minuteMs, entries } = field;
+  const { outing, frame, roundNo, round, trueMs, entries } = field;
   const router = useIonRouter();
   const actions = useFieldActions();
   const act = useAct();
-  const gear = useGear() ?? frame.setups;
+  const gear = useGear() ?? [];
   const rows = useRowActs(outing, roundNo, touchRows);
   const rowPaths = useRowPaths(field);
-  const setupLabel = (id: string): string => gear.find((setup) => setup.id === id)?.label ?? 'setup';
+  const setupLabel = (id: string): string => [...frame.setups, ...gear].find((setup) => setup.id === id)?.label ?? 'setup';
   const onAirOf = (target: StoredTarget) => field.onAir.get(target.id) ?? ALWAYS_ON;
   const nameOf = (id: string | null) => frame.targets.find((target) => target.id === id)?.fields.name ?? null;
   const edit = (entry: StoredReception): void => router.push(padForEdit(entry.id));
@@ -50,7 +50,7 @@ export function RoundPart({ field, touchRows, onEnd }: RoundPartProps) {
               isTriedAnyway={rows.triedAnyway.has(row.target.id)}
               path={rowPaths.get(row.target.id) ?? ''}
               setupLabel={row.entry ? setupLabel(row.entry.fields.setupId) : ''}
-              minuteMs={minuteMs}
+              nowMs={trueMs}
               acts={rows.rows}
             />
           ))}
@@ -78,7 +78,7 @@ export function RoundPart({ field, touchRows, onEnd }: RoundPartProps) {
       <RowSheets
         question={rows.question}
         onAir={onAirOf}
-        minuteMs={minuteMs}
+        nowMs={trueMs}
         isAnswered={(target) => round.rows.some((row) => row.target.id === target.id && row.entry !== null)}
         onNil={rows.nil}
         onSkip={rows.skip}

@@ -46,6 +46,7 @@ export function RunningScreen({ field, areRowsStill, touchRows }: RunningScreenP
       <ClockRow
         trust={field.trust}
         minuteMs={minuteMs}
+        trueMs={field.trueMs}
         position={frame.position}
         onCheck={() => setSheet('clock')}
       />

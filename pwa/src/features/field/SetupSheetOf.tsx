@@ -16,7 +16,7 @@ export function SetupSheetOf({
   const actions = useFieldActions();
   const act = useAct();
   const gear = useGear() ?? [];
-  const add = (setupId: string): void => {
+  const use = (setupId: string): void => {
     onClose();
     void act(() => actions.switchSetup(outing, setupId, { atMs: Date.now(), roundNo }));
   };
@@ -30,7 +30,7 @@ export function SetupSheetOf({
       gear={gear}
       currentSetupId={outing.fields.currentSetupId}
       entries={entries}
-      onAdd={add}
+      onUse={use}
       onMend={mend}
       onClose={onClose}
     />

@@ -12,7 +12,9 @@ import { useOwnOutings, type OwnOutings } from './data/running-outing';
 import { useFieldActions } from './data/use-field-actions';
 import { Cautions } from './ui/Cautions';
 import { FieldFrame, InFoot } from './ui/FieldFrame';
+import { withLabels } from './setup-labels';
 import { useAct } from './use-act';
+import { useFewFirst } from './use-few-first';
 import { useStartChoice, type StartChoice, type StartWishes } from './use-start-choice';
 import { othersSee } from './words';
 
@@ -72,15 +74,21 @@ function SiteSection({ choice, wish }: SectionProps) {
       New site
     </ButtonLink>
   );
+  const { shown, showRest } = useFewFirst(choice.sites, choice.site ? [choice.site.id] : []);
   return (
     <Section title="Site" aside={newSite}>
       <ChoiceChips
         label="Site"
         hideLabel
-        options={choice.sites.map(({ id, name }) => ({ value: id, label: name }))}
+        options={shown.map(({ id, name }) => ({ value: id, label: name }))}
         value={choice.site?.id ?? null}
         onChange={(id) => wish({ siteId: id ?? undefined })}
       />
+      {showRest ? (
+        <Button look="quiet" onClick={showRest}>
+          All {choice.sites.length} sites
+        </Button>
+      ) : null}
       <p className="fd-see" role="status">
         {choice.site
           ? `Others will see ${othersSee(choice.site.place)}.`
@@ -96,14 +104,21 @@ function SetupSection({ choice: { setups }, wish }: SectionProps) {
       New setup
     </ButtonLink>
   );
+  const takenIds = setups.taken.map(({ id }) => id);
+  const { shown, showRest } = useFewFirst(setups.offered, takenIds);
   return (
     <Section title="Setups" aside={newSetup}>
       <ManyChips
         label={`Taken along, up to ${SETUPS_PER_OUTING_MAX}`}
-        options={setups.offered.map(({ id, label }) => ({ value: id, label }))}
-        value={setups.taken.map(({ id }) => id)}
+        options={withLabels(shown).map(({ id, label }) => ({ value: id, label }))}
+        value={takenIds}
         onChange={(ids) => wish({ setupIds: ids.slice(0, SETUPS_PER_OUTING_MAX) })}
       />
+      {showRest ? (
+        <Button look="quiet" onClick={showRest}>
+          All {setups.offered.length} setups
+        </Button>
+      ) : null}
       {setups.taken.length > 1 ? (
         <ChoiceChips
           label="In use at the start"

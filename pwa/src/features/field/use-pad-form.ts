@@ -4,6 +4,7 @@ import type { PadStart } from './data/pad-start';
 import type { PadValues } from './data/pad-drafts';
 import { usePadLog } from './data/use-pad-log';
 import { receptionFromPad, samePadValues } from './pad-values';
+import { rstOf } from './rst-parts';
 import { useAct } from './use-act';
 
 /** A draft is durable so long after each change. */
@@ -44,6 +45,16 @@ export function usePadForm(start: ReadyStart) {
       setValues((known) => ({ ...known, scores: { ...known.scores, ...part } })),
     [],
   );
+  /** The tone of an RST belongs to telegraphy: a report follows its mode. */
+  const changeMode = useCallback(
+    (mode: PadValues['mode']) =>
+      setValues((known) => {
+        const { rst } = known.scores;
+        const scores = rst ? { ...known.scores, rst: rstOf(known.rstParts, mode === 'CW') } : known.scores;
+        return { ...known, mode, scores };
+      }),
+    [],
+  );
   const answer = async (work: () => Promise<unknown>): Promise<boolean> => {
     setSaving(true);
     isAnswered.current = true;
@@ -54,8 +65,10 @@ export function usePadForm(start: ReadyStart) {
   };
   return {
     values,
+    outlined: start.outlined,
     change,
     changeScores,
+    changeMode,
     isDirty,
     isSaving,
     save: () => answer(() => log.save(values, receptionFromPad(start.base, values, start.outlined))),

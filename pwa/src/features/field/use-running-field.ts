@@ -4,6 +4,8 @@ import { onAirState, type OnAirState } from '@harkmoor/sync-model/evidence/sched
 import { forgottenSince } from '@harkmoor/sync-model/records/forgotten-outing';
 import { currentRoundNo, roundOf, type Round } from '@harkmoor/sync-model/records/round';
 import { isSetupQuestionDue } from '@harkmoor/sync-model/records/setup-question';
+import { stampOf } from '@harkmoor/sync-model/merge/record-state';
+import { stampWallMs } from '@harkmoor/sync-model/stamp/stamp';
 import { useMinute } from '../../platform/tick';
 import { useOwnChecks } from './data/clock-checks';
 import { useOutingMemory, type OutingMemory } from './data/field-settings';
@@ -17,8 +19,10 @@ export type RunningField = {
   outing: StoredOuting;
   frame: OutingFrame;
   memory: OutingMemory;
-  /** Device time floored to the minute, ms UTC: what schedules and the sun are asked with. */
+  /** Device time floored to the minute, ms UTC: what entries are made with. */
   minuteMs: number;
+  /** The same by the clock check where it is trusted: what the sun and the schedules go by. */
+  trueMs: number;
   trust: ClockTrust;
   /** Entries that stand, in the order in which they were made. */
   entries: StoredReception[];
@@ -43,17 +47,19 @@ export function useRunningField(outing: StoredOuting, areRowsStill: boolean): Ru
   const targets = useStillWhile(areRowsStill, frame?.targets);
   return useMemo(() => {
     if (!frame || !allEntries || !memory || !checks || !targets) return null;
-    const trust = clockTrust(checks, outing.fields.clockSteps, minuteMs);
+    const trust = clockTrust(checks, outing.fields.clockSteps, minuteMs, stampOf(outing, 'clockSteps'));
     const trueMs = minuteMs + (trust.kind === 'checked' ? trust.check.offsetMs : 0);
     const entries = allEntries.filter(({ fields }) => !fields.deleted);
     const roundNo = currentRoundNo(entries, memory.roundNo);
     const onAir = new Map(targets.map((target) => [target.id, onAirState(target.fields, trueMs)]));
-    const now = { setupId: outing.fields.currentSetupId, atMs: minuteMs, roundNo };
+    const switchedAtMs = stampWallMs(stampOf(outing, 'currentSetupId'));
+    const setupNow = { setupId: outing.fields.currentSetupId, switchedAtMs, atMs: minuteMs, roundNo };
     return {
       outing,
       frame,
       memory,
       minuteMs,
+      trueMs,
       trust,
       entries,
       roundNo,
@@ -61,7 +67,7 @@ export function useRunningField(outing: StoredOuting, areRowsStill: boolean): Ru
       onAir,
       lastAct: lastActOf(allEntries, memory.act),
       sameAgain: entries.findLast(({ fields }) => fields.outcome === 'heard' && !fields.swap) ?? null,
-      isSetupQuestionDue: memory.setup !== null && isSetupQuestionDue(memory.setup, now),
+      isSetupQuestionDue: isSetupQuestionDue(memory.setup, setupNow),
       forgottenAt: forgottenSince(
         outing.fields,
         entries.map(({ fields }) => fields.deviceAt),

@@ -1,8 +1,9 @@
 import type { OutingStart } from '@harkmoor/sync-model/records/outing-from-start';
-import { useGear, type SetupChoice } from './data/gear';
+import { setupsOf, useGear, type SetupChoice } from './data/gear';
 import type { StoredOuting } from './data/running-outing';
 import { useSites, type SiteOption } from './data/sites';
 import { useTargetLists, type ListOption } from './data/target-lists';
+import { withLabels } from './setup-labels';
 
 /** What the person changed of the last outing's choice. */
 export type StartWishes = {
@@ -29,7 +30,7 @@ export function useStartChoice(newest: StoredOuting | null, wishes: StartWishes)
   const lists = useTargetLists();
   if (!sites || !gear || !lists) return null;
   const last = newest?.fields;
-  const offered = gear.filter(({ isRetired }) => !isRetired);
+  const offered = withLabels(gear.filter(({ isOffered }) => isOffered));
   const site = byId(sites, wishes.siteId ?? last?.siteId) ?? (sites.length === 1 ? sites[0]! : null);
   const taken = takenSetups(offered, wishes.setupIds ?? last?.setupIds ?? []);
   const current = byId(taken, wishes.currentSetupId ?? last?.currentSetupId) ?? taken[0] ?? null;
@@ -49,10 +50,10 @@ export function useStartChoice(newest: StoredOuting | null, wishes: StartWishes)
 
 /** Those asked for; where none of them is left, the one that there is. */
 function takenSetups(offered: readonly SetupChoice[], ids: readonly string[]): SetupChoice[] {
-  const taken = ids.map((id) => byId(offered, id)).filter((setup) => setup !== null);
+  const taken = setupsOf(offered, ids);
   if (taken.length > 0 || ids.length > 0) return taken;
   const own = offered.filter(({ isOwn }) => isOwn);
-  return (own.length > 0 ? own : offered).slice(0, 1);
+  return withLabels((own.length > 0 ? own : offered).slice(0, 1));
 }
 
 function byId<T extends { id: string }>(items: readonly T[], id: string | undefined): T | null {

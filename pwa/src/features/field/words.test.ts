@@ -21,10 +21,12 @@ describe('the words of the field', () => {
   });
 
   it('should never show a nil as a score, nor old scores as new ones', () => {
+    const heard = { outcome: 'heard', nilReason: null, sinpo: null, rst: null, carried: null } as const;
     const sinpo = { s: 3, i: 5, n: 4, p: 3, o: 3 } as const;
-    expect(outcomeWords({ outcome: 'heard', sinpo, rst: null, carried: null })).toBe('35433');
-    expect(outcomeWords({ outcome: 'heard', sinpo, rst: null, carried: ['sinpo'] })).toBe('Heard');
-    expect(outcomeWords({ outcome: 'nil', sinpo: null, rst: null, carried: null })).toBe('Nil');
+    expect(outcomeWords({ ...heard, sinpo })).toBe('35433');
+    expect(outcomeWords({ ...heard, sinpo, carried: ['sinpo'] })).toBe('Heard');
+    expect(outcomeWords({ ...heard, outcome: 'nil' })).toBe('Nil');
+    expect(outcomeWords({ ...heard, outcome: 'nil', nilReason: 'noise' })).toBe('Nil, noise');
   });
 
   it('should say what is added to the device time, and warn of what cannot be trusted', () => {

@@ -47,9 +47,11 @@ export const NIL_REASON_WORDS: Readonly<Record<NilReason, string>> = {
   fault: 'Receiver or antenna fault',
 };
 
-/** "35433", "59", "Nil", "Skipped"; carried figures are no score of this entry. */
-export function outcomeWords(fields: Pick<Reception, 'outcome' | 'sinpo' | 'rst' | 'carried'>): string {
-  if (fields.outcome === 'nil') return 'Nil';
+/** "35433", "59", "Nil", "Nil, noise", "Skipped"; carried figures are no score of this entry. */
+export function outcomeWords(
+  fields: Pick<Reception, 'outcome' | 'nilReason' | 'sinpo' | 'rst' | 'carried'>,
+): string {
+  if (fields.outcome === 'nil') return fields.nilReason ? `Nil, ${fields.nilReason}` : 'Nil';
   if (fields.outcome === 'skipped') return 'Skipped';
   if (fields.sinpo && !fields.carried?.includes('sinpo')) return formatSinpo(fields.sinpo);
   if (fields.rst && !fields.carried?.includes('rst')) return formatRst(fields.rst);

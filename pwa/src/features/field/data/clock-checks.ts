@@ -1,5 +1,5 @@
 import type { ClockCheck } from '@harkmoor/sync-model/records/clock-check';
-import type { TimeCheck } from '@harkmoor/sync-model/evidence/corrected-time';
+import type { StampedCheck } from '@harkmoor/sync-model/evidence/clock-trust';
 import { CHECK_REACH_MS } from '@harkmoor/sync-model/evidence/corrected-time';
 import { Dexie } from 'dexie';
 import { useLiveQuery } from 'dexie-react-hooks';
@@ -13,18 +13,18 @@ function firstIdAt(ms: number): string {
 }
 
 /** The checks that this device made lately; older ones say nothing about now, but for "older than 12 h". */
-export async function readOwnChecks(log: OpenLog, nowMs: number): Promise<TimeCheck[]> {
+export async function readOwnChecks(log: OpenLog, nowMs: number): Promise<StampedCheck[]> {
   const checks = await log.database
     .recordTable('clock-check')
     .where('[clubId+id]')
     .between([log.clubId, firstIdAt(nowMs - 20 * CHECK_REACH_MS)], [log.clubId, Dexie.maxKey])
     .toArray();
   return checks
-    .map(({ fields }) => fields)
+    .map((record) => ({ ...record.fields, stamp: record.at }))
     .filter((check) => check.deviceId === log.deviceId && !check.deleted);
 }
 
-export function useOwnChecks(): TimeCheck[] | undefined {
+export function useOwnChecks(): StampedCheck[] | undefined {
   const log = useActiveLog();
   return useLiveQuery(() => readOwnChecks(log, Date.now()), [log]);
 }

@@ -1,6 +1,7 @@
 import { receptionFromTap, type Tap } from '@harkmoor/sync-model/records/reception-from-tap';
 import type { Reception } from '@harkmoor/sync-model/records/reception';
 import type { OpenLog } from '../../../store/open-log';
+import { editOf } from './edit-undo';
 import { padDraftId } from './pad-drafts';
 import { changeOutingMemory } from './field-settings';
 
@@ -19,9 +20,20 @@ export async function saveNewEntry(log: OpenLog, id: string, fields: Reception):
   await log.database.drafts.delete(padDraftId(id));
 }
 
-export async function saveEdit(log: OpenLog, id: string, patch: Partial<Reception>): Promise<void> {
+/** Saves an edit; the line with *Undo* offers what it replaced until the next entry. */
+export async function saveEdit(
+  log: OpenLog,
+  id: string,
+  patch: Partial<Reception>,
+  nowMs: number,
+): Promise<void> {
+  const stored = await log.database.recordTable('reception').get([log.clubId, id]);
   await log.writer.edit('reception', id, patch);
   await log.database.drafts.delete(padDraftId(id));
+  const edit = stored ? editOf(stored.fields, patch) : null;
+  if (edit === null || !stored?.fields.outingId) return;
+  const act = { kind: 'edited', receptionId: id, ...edit, atMs: nowMs } as const;
+  await changeOutingMemory(log, stored.fields.outingId, { act });
 }
 
 /** Puts an entry into the bin; the line with *Undo* offers to take it out again. */

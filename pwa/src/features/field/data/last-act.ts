@@ -1,6 +1,7 @@
 import { mendToUndo, type SetupMend } from '@harkmoor/sync-model/records/batch-mend';
 import type { OpenLog } from '../../../store/open-log';
 import type { WriteStep } from '../../../store/log-writer';
+import { patchToUndo, type EntryEdit } from './edit-undo';
 import { changeOutingMemory } from './field-settings';
 import { readEntries, type StoredReception } from './outing-entries';
 
@@ -9,12 +10,14 @@ export type UndoableAct = { atMs: number } & (
   | { kind: 'binned'; receptionId: string }
   | { kind: 'put-back'; receptionId: string }
   | { kind: 'mended'; mend: SetupMend }
+  | ({ kind: 'edited'; receptionId: string } & EntryEdit)
 );
 
 /** What the line with *Undo* speaks of: the newest entry, or an act that came after it. */
 export type LastAct =
   | { kind: 'entry'; entry: StoredReception }
   | { kind: 'binned'; entry: StoredReception }
+  | { kind: 'edited'; entry: StoredReception; edit: EntryEdit }
   | { kind: 'mended'; mend: SetupMend };
 
 /**
@@ -30,6 +33,7 @@ export function lastActOf(entries: readonly StoredReception[], act: UndoableAct 
     if (act.kind === 'mended') return act;
     const entry = entries.find(({ id }) => id === act.receptionId);
     if (!entry) return null;
+    if (act.kind === 'edited') return editedAct(act, entry, newest);
     if (act.kind === 'binned' && entry.fields.deleted) return { kind: 'binned', entry };
     // a put-back entry may be taken out again; nothing older is offered after it
     return entry.fields.deleted ? null : { kind: 'entry', entry };
@@ -37,7 +41,13 @@ export function lastActOf(entries: readonly StoredReception[], act: UndoableAct 
   return newest ? { kind: 'entry', entry: newest } : null;
 }
 
-/** Takes the act back: an entry goes to the bin, a binned one comes out of it, a mend is undone entry by entry. */
+function editedAct(edit: EntryEdit, entry: StoredReception, newest: StoredReception | null): LastAct | null {
+  const canBeUndone = !entry.fields.deleted && Object.keys(patchToUndo(edit, entry.fields)).length > 0;
+  if (canBeUndone) return { kind: 'edited', entry, edit };
+  return newest ? { kind: 'entry', entry: newest } : null;
+}
+
+/** Takes the act back: an entry goes to the bin, a binned one comes out of it, a mend is undone entry by entry, an edit field by field. */
 export async function undo(log: OpenLog, outingId: string, act: LastAct, nowMs: number): Promise<void> {
   if (act.kind === 'mended') {
     const entries = await readEntries(log, outingId);
@@ -48,6 +58,12 @@ export async function undo(log: OpenLog, outingId: string, act: LastAct, nowMs: 
       patch: { setupId },
     }));
     if (steps.length > 0) await log.writer.apply(steps);
+    await changeOutingMemory(log, outingId, { act: null });
+    return;
+  }
+  if (act.kind === 'edited') {
+    const { id, fields } = act.entry;
+    await log.writer.edit('reception', id, patchToUndo(act.edit, fields));
     await changeOutingMemory(log, outingId, { act: null });
     return;
   }

@@ -5,7 +5,7 @@ import { inRoundOrder } from '@harkmoor/sync-model/records/round';
 import { useLiveQuery } from 'dexie-react-hooks';
 import { useActiveLog } from '../../../store/active-log';
 import type { OpenLog } from '../../../store/open-log';
-import { readGear, type SetupChoice } from './gear';
+import { readGear, setupsOf, type SetupChoice } from './gear';
 import type { StoredOuting } from './running-outing';
 
 export type StoredTarget = StoredRecord<'target'>;
@@ -36,10 +36,7 @@ export async function readOutingFrame(log: OpenLog, outing: StoredOuting): Promi
         .equals([clubId, targetListId])
         .toArray()
     : [];
-  const gear = await readGear(log);
-  const setups = setupIds
-    .map((id) => gear.find((setup) => setup.id === id))
-    .filter((one) => one !== undefined);
+  const setups = setupsOf(await readGear(log), setupIds);
   const exact = fix && !fix.fields.deleted ? fix.fields.fix : null;
   return {
     site,

@@ -4,6 +4,7 @@ import type { TouchedScores } from '@harkmoor/sync-model/records/score-draft';
 import { useLiveQuery } from 'dexie-react-hooks';
 import { useActiveLog } from '../../../store/active-log';
 import type { OpenLog } from '../../../store/open-log';
+import type { RstParts } from '../rst-parts';
 
 export const PAD_FORM = 'score-pad';
 
@@ -22,6 +23,8 @@ export type PadValues = {
   /** The time of the entry, ms by the device clock. */
   atMs: number;
   scores: TouchedScores;
+  /** The figures of an RST that were touched; `scores` holds the report once it is whole. */
+  rstParts: RstParts;
   mode: Mode;
   dialHz: number;
   setupId: string;

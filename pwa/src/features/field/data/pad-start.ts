@@ -8,10 +8,10 @@ import {
 import type { Mode } from '@harkmoor/sync-model/records/common-fields';
 import type { Reception } from '@harkmoor/sync-model/records/reception';
 import { frequencyText } from '@harkmoor/sync-model/radio/bands/frequency-text';
-import { SINPO_LETTERS } from '@harkmoor/sync-model/radio/signal/sinpo';
 import { utcHourMinute } from '../../../platform/utc-text';
 import type { OpenLog } from '../../../store/open-log';
-import { readGear, type SetupChoice } from './gear';
+import { carriedOf, outlinesOf, touchedOf } from './entry-scores';
+import { readGear, setupsOf, type SetupChoice } from './gear';
 import { readPadDraft, type PadValues } from './pad-drafts';
 import { readOwnOutings } from './running-outing';
 
@@ -87,9 +87,9 @@ async function startNew(log: OpenLog, address: PadAddress): Promise<PadStart> {
     base,
     outlined,
     untouched,
-    values: draft ?? untouched,
+    values: { ...untouched, ...draft },
     targetName,
-    setups: await readGear(log),
+    setups: await readSetups(log, base),
   };
 }
 
@@ -111,10 +111,16 @@ async function startEdit(log: OpenLog, address: PadAddress, id: string): Promise
     base,
     outlined,
     untouched,
-    values: draft ?? untouched,
+    values: { ...untouched, ...draft },
     targetName,
-    setups: await readGear(log),
+    setups: await readSetups(log, base),
   };
+}
+
+/** What may have been used: the setups of the entry's outing, with the one that the entry names. */
+async function readSetups(log: OpenLog, { outingId, setupId }: Reception): Promise<SetupChoice[]> {
+  const outing = outingId ? await log.database.recordTable('outing').get([log.clubId, outingId]) : undefined;
+  return setupsOf(await readGear(log), [...new Set([...(outing?.fields.setupIds ?? []), setupId])]);
 }
 
 function subjectOf(address: PadAddress, target: StoredRecord<'target'> | undefined): TapSubject | null {
@@ -139,33 +145,6 @@ function againOf(made: Reception, before: Reception | undefined): Reception {
   return { ...made, tuning, stationName, identity, bandwidthHz };
 }
 
-function outlinesOf({ sinpo, rst, meter, noiseMeter }: Reception): OutlinedScores {
-  return { sinpo, rst, meter, noiseMeter };
-}
-
-/** The figures of a saved entry that count: all that were not merely carried over. */
-function touchedOf(fields: Reception): TouchedScores {
-  const counts = (name: 'sinpo' | 'rst' | 'meter' | 'noiseMeter') => !fields.carried?.includes(name);
-  const { sinpo, rst, meter, noiseMeter } = fields;
-  return {
-    sinpo: sinpo && counts('sinpo') ? Object.fromEntries(SINPO_LETTERS.map((one) => [one, sinpo[one]])) : {},
-    ...(rst && counts('rst') ? { rst } : {}),
-    ...(meter && counts('meter') ? { meter } : {}),
-    ...(noiseMeter && counts('noiseMeter') ? { noiseMeter } : {}),
-  };
-}
-
-function carriedOf(fields: Reception): OutlinedScores {
-  const only = <T>(name: 'sinpo' | 'rst' | 'meter' | 'noiseMeter', value: T): T | null =>
-    fields.carried?.includes(name) ? value : null;
-  return {
-    sinpo: only('sinpo', fields.sinpo),
-    rst: only('rst', fields.rst),
-    meter: only('meter', fields.meter),
-    noiseMeter: only('noiseMeter', fields.noiseMeter),
-  };
-}
-
 function valuesOf(
   base: Reception,
   pad: { id: string; path: string; isEdit: boolean; targetName: string | null; touched: TouchedScores },
@@ -183,6 +162,7 @@ function valuesOf(
     nilReason: base.nilReason,
     atMs: base.deviceAt,
     scores: pad.touched,
+    rstParts: pad.touched.rst ?? {},
     mode: base.tuning.mode,
     dialHz: base.tuning.dialHz,
     setupId: base.setupId,

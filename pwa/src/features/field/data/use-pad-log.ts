@@ -38,7 +38,7 @@ export function usePadLog() {
       dropDraft: (receptionId: string) => dropPadDraft(log, receptionId),
       save: (values: PadValues, fields: Reception) =>
         values.isEdit
-          ? saveEdit(log, values.receptionId, fields)
+          ? saveEdit(log, values.receptionId, fields, Date.now())
           : saveNewEntry(log, values.receptionId, fields),
       bin: async (values: PadValues) => {
         await binEntry(log, { id: values.receptionId, outingId: values.outingId }, Date.now());

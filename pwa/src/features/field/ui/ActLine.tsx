@@ -29,5 +29,6 @@ function actWords(act: LastAct): string {
   }
   const { fields } = act.entry;
   const what = `${outcomeWords(fields)}, ${frequencyText(fields.tuning.dialHz)}, ${utcHourMinute(fields.deviceAt)}`;
+  if (act.kind === 'edited') return `Changed: ${what}`;
   return act.kind === 'binned' ? `In the bin: ${what}` : what;
 }

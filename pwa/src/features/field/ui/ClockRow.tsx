@@ -9,19 +9,21 @@ import { clockWords } from '../words';
 type ClockRowProps = {
   readonly trust: ClockTrust;
   readonly minuteMs: number;
+  /** By the clock check where it is trusted. */
+  readonly trueMs: number;
   readonly position: Position | null;
   readonly onCheck: () => void;
 };
 
 /** The large UTC clock with what its checks say of it, the sun at the site, and the theme key. */
-export function ClockRow({ trust, minuteMs, position, onCheck }: ClockRowProps) {
+export function ClockRow({ trust, minuteMs, trueMs, position, onCheck }: ClockRowProps) {
   const { text, isWarning } = clockWords(trust, minuteMs);
   const aheadMs = trust.kind === 'checked' ? -trust.check.offsetMs : 0;
   return (
     <div className="fd-clock">
       <UtcClock aheadMs={aheadMs} />
       <div className="fd-clock-side">
-        {position ? <Sun position={position} minuteMs={minuteMs} /> : null}
+        {position ? <Sun position={position} atMs={trueMs} /> : null}
         <ThemeKey />
       </div>
       <button type="button" className={isWarning ? 'fd-check fd-check-warn' : 'fd-check'} onClick={onCheck}>
@@ -35,9 +37,9 @@ export function ClockRow({ trust, minuteMs, position, onCheck }: ClockRowProps) 
   );
 }
 
-function Sun({ position, minuteMs }: { position: Position; minuteMs: number }) {
+function Sun({ position, atMs }: { position: Position; atMs: number }) {
   const { latDeg, lonDeg } = position;
-  const sun = useMemo(() => sunWords({ latDeg, lonDeg }, minuteMs), [latDeg, lonDeg, minuteMs]);
+  const sun = useMemo(() => sunWords({ latDeg, lonDeg }, atMs), [latDeg, lonDeg, atMs]);
   return (
     <div className="fd-sun num">
       <strong>{sun.state}</strong>

@@ -1,5 +1,6 @@
 import { ChoiceChips } from '../../../design/choice/ChoiceChips';
 import { TextField } from '../../../design/form/TextField';
+import { rstOf } from '../rst-parts';
 import type { PadForm } from '../use-pad-form';
 import { ProgrammeField } from './ProgrammeField';
 import { RstKeys } from './RstKeys';
@@ -15,6 +16,7 @@ const IDENTITIES = [
 /** One part of an entry that is opened when it is wanted. */
 export function PadPart({ part, form }: { readonly part: PartName; readonly form: PadForm }) {
   const { values, change } = form;
+  const hasTone = values.mode === 'CW';
   switch (part) {
     case 'remark':
       return (
@@ -48,9 +50,13 @@ export function PadPart({ part, form }: { readonly part: PartName; readonly form
     case 'rst':
       return (
         <RstKeys
-          rst={values.scores.rst ?? null}
-          hasTone={values.mode === 'CW'}
-          onRst={(rst) => form.changeScores({ rst })}
+          parts={values.rstParts}
+          outlined={form.outlined.rst}
+          hasTone={hasTone}
+          onParts={(rstParts) => {
+            change({ rstParts });
+            form.changeScores({ rst: rstOf(rstParts, hasTone) });
+          }}
         />
       );
   }

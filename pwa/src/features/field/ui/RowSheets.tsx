@@ -12,7 +12,7 @@ import { NIL_REASON_WORDS, offAirWords, onAirWords } from '../words';
 type RowSheetsProps = {
   readonly question: RowQuestion | null;
   readonly onAir: (target: StoredTarget) => OnAirState;
-  readonly minuteMs: number;
+  readonly nowMs: number;
   readonly isAnswered: (target: StoredTarget) => boolean;
   readonly onNil: (target: StoredTarget, reason: NilReason, atMs: number) => void;
   readonly onSkip: (target: StoredTarget) => void;
@@ -47,7 +47,7 @@ export function RowSheets(props: RowSheetsProps) {
   }
   return (
     <Sheet isOpen title={name} onClose={onClose}>
-      <TargetFacts target={target} onAir={props.onAir(target)} minuteMs={props.minuteMs} />
+      <TargetFacts target={target} onAir={props.onAir(target)} nowMs={props.nowMs} />
       <div className="fd-sheet-list">
         <Button onClick={then(() => props.onHeard(target))}>
           {props.isAnswered(target) ? 'Heard once more' : 'Heard'}
@@ -64,21 +64,13 @@ export function RowSheets(props: RowSheetsProps) {
   );
 }
 
-function TargetFacts({
-  target,
-  onAir,
-  minuteMs,
-}: {
-  target: StoredTarget;
-  onAir: OnAirState;
-  minuteMs: number;
-}) {
+function TargetFacts({ target, onAir, nowMs }: { target: StoredTarget; onAir: OnAirState; nowMs: number }) {
   const { mode, language, powerKw, note, schedule } = target.fields;
   const times =
     schedule === 'always'
       ? 'always on air'
       : schedule.map(({ from, to }) => `${from}–${to}`).join(', ') + ' UTC';
-  const state = onAir.kind === 'on' ? onAirWords(onAir) : offAirWords(onAir, minuteMs);
+  const state = onAir.kind === 'on' ? onAirWords(onAir) : offAirWords(onAir, nowMs);
   const facts = [mode, language, powerKw === null ? null : `${powerKw}\u202fkW`, times, state];
   return (
     <>

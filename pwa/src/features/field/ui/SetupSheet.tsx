@@ -1,4 +1,6 @@
 import { useState } from 'react';
+import { frequencyText } from '@harkmoor/sync-model/radio/bands/frequency-text';
+import { SETUPS_PER_OUTING_MAX } from '@harkmoor/sync-model/records/outing-from-start';
 import { Button } from '../../../design/button/Button';
 import { ButtonLink } from '../../../design/button/ButtonLink';
 import { ChoiceChips } from '../../../design/choice/ChoiceChips';
@@ -7,44 +9,77 @@ import { paths } from '../../../platform/paths';
 import { utcHourMinute } from '../../../platform/utc-text';
 import type { SetupChoice } from '../data/gear';
 import type { StoredReception } from '../data/outing-entries';
+import { withLabels } from '../setup-labels';
 
 type SetupSheetProps = {
   readonly taken: readonly SetupChoice[];
-  /** All setups on this phone that are in use. */
+  /** All setups on this phone. */
   readonly gear: readonly SetupChoice[];
   readonly currentSetupId: string;
   readonly entries: readonly StoredReception[];
-  readonly onAdd: (setupId: string) => void;
+  /** Entries from now carry it; it joins the outing where it was not taken along. */
+  readonly onUse: (setupId: string) => void;
   readonly onMend: (sinceMs: number, setupId: string) => void;
   readonly onClose: () => void;
 };
 
-const SETUPS_MAX = 6;
 const ENTRIES_OFFERED = 8;
 
-/** More setups for this outing, and *Change for entries since…* for a run that names the wrong one. */
+/** The setup from now on, *Change for entries since…* for a run that names the wrong one, and more setups. */
 export function SetupSheet(props: SetupSheetProps) {
-  const { taken, gear } = props;
-  const others = gear.filter(({ id, isRetired }) => !isRetired && !taken.some((one) => one.id === id));
-  const isFull = taken.length >= SETUPS_MAX;
+  const { taken, currentSetupId } = props;
   return (
     <Sheet isOpen title="Setups" onClose={props.onClose}>
-      <h3 className="fd-sheet-head">Take another along</h3>
-      {isFull ? <p className="soft">An outing takes six setups along. This one has them.</p> : null}
-      <div className="fd-sheet-list">
-        {isFull
-          ? null
-          : others.map((setup) => (
-              <Button key={setup.id} look="outline" onClick={() => props.onAdd(setup.id)}>
-                {setup.antennaName} · {setup.receiverName}
-              </Button>
-            ))}
-        <ButtonLink to={paths.newSetup()} look="quiet">
-          Make a new setup
-        </ButtonLink>
-      </div>
+      {taken.length > 1 ? (
+        <ChoiceChips
+          label="From now on"
+          options={taken.map(({ id, label }) => ({ value: id, label }))}
+          value={currentSetupId}
+          onChange={(id) => id !== null && props.onUse(id)}
+        />
+      ) : null}
       <Mend {...props} />
+      <TakeAlong {...props} />
     </Sheet>
+  );
+}
+
+function TakeAlong({ taken, gear, onUse }: SetupSheetProps) {
+  const others = withLabels(
+    gear.filter(({ id, isOffered }) => isOffered && !taken.some((one) => one.id === id)),
+  );
+  const keys = (isOwn: boolean) =>
+    others
+      .filter((setup) => setup.isOwn === isOwn)
+      .map(({ id, label }) => (
+        <Button key={id} look="outline" onClick={() => onUse(id)}>
+          {label}
+        </Button>
+      ));
+  const shared = keys(false);
+  const head = <h3 className="fd-sheet-head">Take another along</h3>;
+  if (taken.length >= SETUPS_PER_OUTING_MAX) {
+    return (
+      <>
+        {head}
+        <p className="soft">An outing takes six setups along. This one has them.</p>
+      </>
+    );
+  }
+  return (
+    <>
+      {head}
+      <div className="fd-sheet-list">{keys(true)}</div>
+      {shared.length > 0 ? (
+        <details className="fd-more">
+          <summary>With gear of others · {shared.length}</summary>
+          <div className="fd-sheet-list">{shared}</div>
+        </details>
+      ) : null}
+      <ButtonLink to={paths.newSetup()} look="quiet">
+        Make a new setup
+      </ButtonLink>
+    </>
   );
 }
 
@@ -64,7 +99,7 @@ function Mend({ taken, currentSetupId, entries, onMend }: SetupSheetProps) {
         label="Since"
         options={offered.map(({ fields }) => ({
           value: String(fields.deviceAt),
-          label: utcHourMinute(fields.deviceAt),
+          label: `${utcHourMinute(fields.deviceAt)} · ${frequencyText(fields.tuning.dialHz)}`,
         }))}
         value={sinceMs === null ? null : String(sinceMs)}
         onChange={(value) => setSinceMs(value === null ? null : Number(value))}

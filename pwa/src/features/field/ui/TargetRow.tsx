@@ -25,18 +25,20 @@ type TargetRowProps = {
   /** "862 km · 98°"; empty where the transmitter is not known. */
   readonly path: string;
   readonly setupLabel: string;
-  readonly minuteMs: number;
+  readonly nowMs: number;
   readonly acts: RowActs;
 };
 
 /** One line of the round, 96 px high: what to listen for, and its two answers or the one given. */
 export const TargetRow = memo(function TargetRow(props: TargetRowProps) {
-  const { row, onAir, path, acts } = props;
+  const { row, onAir, path, acts, nowMs } = props;
   const { target, entry } = row;
   const { frequencyHz, name } = target.fields;
   const { figure, unit } = formatFrequency(frequencyHz);
   const spoken = `${spokenFrequency(frequencyHz)}, ${name}`;
-  const detail = [path, entry ? '' : onAirWords(onAir)].filter(Boolean).join(' · ');
+  const state =
+    onAir.kind === 'on' ? onAirWords(onAir) : props.isTriedAnyway ? offAirWords(onAir, nowMs) : '';
+  const detail = [path, entry ? '' : state].filter(Boolean).join(' · ');
   return (
     <li
       className={row.isNext ? 'fd-row fd-row-next' : 'fd-row'}
@@ -60,12 +62,12 @@ export const TargetRow = memo(function TargetRow(props: TargetRowProps) {
 });
 
 function Answers(props: TargetRowProps & { readonly spoken: string }) {
-  const { row, onAir, isTriedAnyway, acts, spoken, minuteMs } = props;
+  const { row, onAir, isTriedAnyway, acts, spoken, nowMs } = props;
   if (row.entry) return <DoneAnswer {...props} entry={row.entry} />;
   if (onAir.kind === 'off' && !isTriedAnyway) {
     return (
       <div className="fd-off">
-        {offAirWords(onAir, minuteMs)}
+        {offAirWords(onAir, nowMs)}
         <button
           type="button"
           aria-label={`Try anyway, ${spoken}`}

@@ -1,6 +1,8 @@
+import type { Reception } from '@harkmoor/sync-model/records/reception';
 import { utcTime } from '../../../platform/utc-text';
 
 type TimeMendProps = {
+  readonly outcome: Reception['outcome'];
   readonly atMs: number;
   /** When it was tapped, or what the entry holds: the way back. */
   readonly tappedMs: number;
@@ -8,13 +10,14 @@ type TimeMendProps = {
 };
 
 const MINUTE_MS = 60_000;
+const WORDS = { heard: 'Heard at', nil: 'Nil at', skipped: 'Skipped at' } as const;
 
 /** The tap came late: one minute or five earlier, and back again. */
-export function TimeMend({ atMs, tappedMs, onTime }: TimeMendProps) {
+export function TimeMend({ outcome, atMs, tappedMs, onTime }: TimeMendProps) {
   return (
     <div className="fd-time" role="group" aria-label="Time of the entry">
       <span className="num" role="status">
-        Heard at <b>{utcTime(atMs)}</b> UTC
+        {WORDS[outcome]} <b>{utcTime(atMs)}</b> UTC
       </span>
       <button type="button" aria-label="One minute earlier" onClick={() => onTime(atMs - MINUTE_MS)}>
         −1 min

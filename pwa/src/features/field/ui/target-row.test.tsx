@@ -30,7 +30,7 @@ function show(over: Partial<Parameters<typeof TargetRow>[0]> = {}) {
         isTriedAnyway={false}
         path="862 km · 98°"
         setupLabel=""
-        minuteMs={NOW}
+        nowMs={NOW}
         acts={acts}
         {...over}
       />
