@@ -2,6 +2,7 @@ import { Migrator } from '@mikro-orm/migrations';
 import { defineConfig } from '@mikro-orm/postgresql';
 import { Migration20261201100000 } from '../migrations/Migration20261201100000.js';
 import { Migration20261201110000 } from '../migrations/Migration20261201110000.js';
+import { Migration20261201120000 } from '../migrations/Migration20261201120000.js';
 import { ACCOUNT_ENTITIES } from './accounts/account-entities.js';
 import { CLUB_ENTITIES } from './clubs/club-entities.js';
 import { LOGBOOK_ENTITIES } from './logbook/record-rows.js';
@@ -27,6 +28,7 @@ export function databaseOptions(databaseUrl: string, connectionsMax = 10) {
       migrationsList: [
         { name: 'Migration20261201100000', class: Migration20261201100000 },
         { name: 'Migration20261201110000', class: Migration20261201110000 },
+        { name: 'Migration20261201120000', class: Migration20261201120000 },
       ],
       path: 'dist/migrations',
       pathTs: 'migrations',

@@ -41,7 +41,7 @@ export class Visitor {
     const sent = body === undefined ? null : isRaw(body) ? body : JSON.stringify(body);
     const response = await fetch(this.url + path, { method, headers, body: sent, redirect: 'manual' });
     this.keepCookie(response.headers.getSetCookie());
-    const text = await response.text();
+    const text = await textOf(response);
     const isJson = response.headers.get('content-type')?.startsWith('application/json') && text !== '';
     const parsed = isJson ? (JSON.parse(text) as Record<string, unknown>) : {};
     return { status: response.status, headers: response.headers, body: parsed, text };
@@ -69,4 +69,13 @@ export class Visitor {
 
 function isRaw(body: unknown): body is string | Uint8Array<ArrayBuffer> {
   return typeof body === 'string' || body instanceof Uint8Array;
+}
+
+/** A stream has no end to wait for: its beginning stands for it. */
+async function textOf(response: Response): Promise<string> {
+  if (!response.headers.get('content-type')?.startsWith('text/event-stream')) return response.text();
+  const reader = response.body!.getReader();
+  const { value } = await reader.read();
+  await reader.cancel();
+  return new TextDecoder().decode(value);
 }

@@ -34,6 +34,12 @@ const MEMBERSHIPS: Statement = {
     where membership.account_id = $1 and membership.left_at is null order by club_id`,
 };
 
+const MEMBERS_AMONG: Statement = {
+  name: 'clubs-members-among',
+  text: `select account_id from membership
+    where club_id = $1 and account_id = any($2::uuid[]) and left_at is null`,
+};
+
 const MEMBER_FEED: FeedSource = {
   type: 'member',
   table: 'membership',
@@ -69,6 +75,11 @@ export class ClubSyncRows implements ClubRows, OnModuleInit {
 
   async setSeq(query: Query, clubId: string, seq: number): Promise<void> {
     await query(SET_SEQ, [clubId, seq]);
+  }
+
+  async membersAmong(query: Query, clubId: string, accountIds: readonly string[]): Promise<string[]> {
+    const rows = await query<{ account_id: string }>(MEMBERS_AMONG, [clubId, accountIds]);
+    return rows.map((row) => row.account_id);
   }
 
   async memberships(query: Query, accountId: string) {

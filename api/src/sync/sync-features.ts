@@ -16,6 +16,8 @@ export type ClubRows = {
   lockClub(query: Query, clubId: string): Promise<HubClub>;
   /** Leaves the club, locked before, at `seq`. */
   setSeq(query: Query, clubId: string, seq: number): Promise<void>;
+  /** Those of the accounts that are members of the club now. */
+  membersAmong(query: Query, clubId: string, accountIds: readonly string[]): Promise<string[]>;
   memberships(query: Query, accountId: string): Promise<{ clubId: string; role: Role; club: HubClub }[]>;
 };
 

@@ -89,6 +89,8 @@ export const ACCESS_ROWS: readonly AccessRow[] = [
     path: ({ clubId }) => `/api/clubs/${clubId}/records/reception/${SOME_RECORD}/history`,
     expected: [401, 404, 404, 200, 200, 200],
   },
+  // whose clubs it tells of is held in test/sync/notices.test.ts
+  { route: 'GET /api/sync/notices', expected: signedIn(200) },
   // who is not in a club gets an answer that leaves the club out; what a round may change is held in test/sync
   {
     route: 'POST /api/sync',
