@@ -12,7 +12,7 @@ type BadgeProps = {
 /** The round badge at the top right: account, club, sync and settings behind it. */
 export function Badge({ to, initials, label }: BadgeProps) {
   return (
-    <Link to={to} className="hm-badge" aria-label={label}>
+    <Link to={to} className="hm-badge" aria-label={initials === '' ? label : `${initials}, ${label}`}>
       <span aria-hidden="true">{initials === '' ? <PersonMark /> : initials}</span>
     </Link>
   );

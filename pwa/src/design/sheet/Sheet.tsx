@@ -50,7 +50,7 @@ function OpenSheet({ title, onClose, foot, children }: SheetProps) {
       onClick={(event) => event.target === dialog.current && onClose()}
     >
       <div className="hm-sheet-body">
-        <header className="hm-sheet-head">
+        <div className="hm-sheet-head">
           <h2 id={titleId} ref={heading} tabIndex={-1}>
             {title}
           </h2>
@@ -59,7 +59,7 @@ function OpenSheet({ title, onClose, foot, children }: SheetProps) {
               <path d="M4 4l12 12M16 4L4 16" stroke="currentColor" strokeWidth="2.5" strokeLinecap="round" />
             </svg>
           </button>
-        </header>
+        </div>
         <div className="hm-sheet-content">{children}</div>
         {foot ? <div className="hm-sheet-foot">{foot}</div> : null}
       </div>
