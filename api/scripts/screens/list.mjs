@@ -55,7 +55,8 @@ export const SCREENS = [
   screen('target-lists', 'admin', '/desk/target-lists', 'h1'),
   screen('target-list', 'admin', ({ targetList }) => targetList, 'h1'),
   screen('target-import', 'admin', ({ targetList }) => targetList && `${targetList}/import`, 'h1'),
-  screen('target-list-new', 'admin', '/desk/target-lists/new', 'h1'),
+  screen('target-list-new', 'admin', '/desk/target-lists', 'h1', press('Add a list')),
+  screen('target-new', 'admin', ({ targetList }) => targetList, 'h1', press('Add a target')),
 
   screen('field-running', 'walker', '/field', '.fd-rows'),
   screen('field-setups', 'walker', '/field', '.fd-rows', openSetups),
