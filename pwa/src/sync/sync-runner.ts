@@ -5,6 +5,7 @@ import type { OpenLog } from '../store/open-log';
 import { IDLE_SENDING, type SendingStatus } from '../platform/sending';
 import { createHttpLink } from './http-link';
 import { afterWriteDelayMs, nextRoundDelayMs, type RoundEnd } from './pacing';
+import { followNotices } from './follow-notices';
 import { createTabLock } from './tab-lock';
 
 export type SyncRunner = {
@@ -60,10 +61,14 @@ export function startSyncRunner(
     const isWantedAgain = isAskedMeanwhile && wasReached;
     isAskedMeanwhile = false;
     wait(isWantedAgain ? 0 : nextRoundDelayMs(end, failures, Math.random()));
+    if (wasReached) notices.follow();
   }
 
   const request = () => wait(0);
   const stopListening = listenForReasons(request, log, () => wait(afterWriteDelayMs()));
+  // after a running round, since most notices tell of what that round itself sends and fetches
+  const isReady = () => !isStopped && !status.isRunning && !isToldToWait(status.pause);
+  const notices = followNotices(log, accountId, isReady, request);
   request();
   return {
     request,
@@ -71,6 +76,7 @@ export function startSyncRunner(
       isStopped = true;
       clearTimeout(timer);
       stopListening();
+      notices.stop();
     },
   };
 }
@@ -82,6 +88,11 @@ function portsOf(log: OpenLog, accountId: string): DevicePorts {
     clock: { deviceNowMs: () => Date.now() },
     lock: createTabLock(log.database.name),
   };
+}
+
+/** Pauses that a notice must not cut short: the server asked for one, or a round cannot help. */
+function isToldToWait(pause: SendingStatus['pause']): boolean {
+  return pause === 'throttled' || pause === 'signed-out' || pause === 'protocol-too-old';
 }
 
 /** A fault of ours must never end the sending: it is shown, logged and tried again. */
