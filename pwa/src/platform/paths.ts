@@ -9,7 +9,7 @@ export const paths = {
   frequency: () => '/field/frequency',
   sites: () => '/field/sites',
   site: (id: string) => `/field/sites/${encodeURIComponent(id)}`,
-  newSite: () => '/field/sites/new',
+  newSite: (query: Query = {}) => withQuery('/field/sites/new', query),
   logbook: (query: Query = {}) => withQuery('/logbook', query),
   reception: (id: string) => `/logbook/${encodeURIComponent(id)}`,
   coverage: (query: Query = {}) => withQuery('/coverage', query),

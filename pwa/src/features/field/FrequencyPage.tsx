@@ -5,15 +5,25 @@ import { useHand } from '../../platform/hand';
 import { paths } from '../../platform/paths';
 import { useOwnOutings, type StoredOuting } from './data/running-outing';
 import { FieldFrame, InFoot } from './ui/FieldFrame';
+import { LockKey } from './ui/LockKey';
 import { ModeChips } from './ui/ModeChips';
+import { RainLock, useRainLock } from './ui/RainLock';
 import type { FrequencyEntry } from './use-frequency-entry';
 import { useFrequencyAnswers } from './use-frequency-answers';
+import './ui/frequency-entry.css';
+import './ui/target-row.css';
 
 /** Frequency entry: our own keys; a planned try is heard or nil, a signal that was simply met is by chance. */
 export function FrequencyPage() {
   const outings = useOwnOutings();
+  const rain = useRainLock();
   return (
-    <FieldFrame title="Other frequency" back={{ to: paths.field(), label: 'Field' }}>
+    <FieldFrame
+      title="Other frequency"
+      back={{ to: paths.field(), label: 'Field' }}
+      actions={<LockKey onLock={rain.lock} />}
+    >
+      {rain.isLocked ? <RainLock onOpen={rain.unlock} /> : null}
       {outings === undefined ? null : outings.running ? (
         <Entry key={outings.running.id} outing={outings.running} />
       ) : (

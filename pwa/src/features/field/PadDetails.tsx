@@ -9,6 +9,7 @@ import { OutcomeChoice } from './ui/OutcomeChoice';
 import { PadPart, type PartName } from './ui/PadPart';
 import { TimeMend } from './ui/TimeMend';
 import type { PadForm } from './use-pad-form';
+import './ui/pad-details.css';
 
 type PadDetailsProps = {
   readonly form: PadForm;
@@ -29,7 +30,10 @@ export function PadDetails({ form, base, setups, onBin }: PadDetailsProps) {
       <Parts form={form} />
       <TimeMend
         outcome={values.outcome}
-        atMs={values.atMs} tappedMs={base.deviceAt} onTime={(atMs) => change({ atMs })} />
+        atMs={values.atMs}
+        tappedMs={base.deviceAt}
+        onTime={(atMs) => change({ atMs })}
+      />
       {values.isEdit ? <StoredParts form={form} setups={setups} /> : null}
       {values.isEdit ? null : <OutcomeChoice form={form} basis={base.basis} />}
       {onBin ? (

@@ -8,6 +8,8 @@ import { usePadStart } from './data/use-pad-log';
 import { padAddress } from './pad-address';
 import { PadScreen } from './PadScreen';
 import { FieldFrame } from './ui/FieldFrame';
+import { LockKey } from './ui/LockKey';
+import { RainLock, useRainLock } from './ui/RainLock';
 import { useGoToField } from './use-go-to-field';
 
 /**
@@ -19,11 +21,17 @@ export function PadPage() {
   const search = useOwnSearch();
   const [title, setTitle] = useState('Score pad');
   const [isShown, setShown] = useState(true);
+  const rain = useRainLock();
   useIonViewWillEnter(() => setShown(true));
   useIonViewDidLeave(() => setShown(false));
   return (
-    <FieldFrame title={title} back={{ to: paths.field(), label: 'Field' }}>
+    <FieldFrame
+      title={title}
+      back={{ to: paths.field(), label: 'Field' }}
+      actions={<LockKey onLock={rain.lock} />}
+    >
       {isShown ? <Pad key={search} search={search} onTitle={setTitle} /> : null}
+      {isShown && rain.isLocked ? <RainLock onOpen={rain.unlock} /> : null}
     </FieldFrame>
   );
 }

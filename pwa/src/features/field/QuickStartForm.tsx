@@ -16,6 +16,7 @@ import { ReadyLine } from './ui/ReadyLine';
 import { useAct } from './use-act';
 import type { StartChoice } from './use-start-choice';
 import { othersSee } from './words';
+import './ui/start.css';
 
 const ENVIRONMENTS: readonly { value: Site['environment']; label: string }[] = [
   { value: 'quiet-rural', label: 'Quiet country' },

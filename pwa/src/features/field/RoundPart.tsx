@@ -33,7 +33,8 @@ export function RoundPart({ field, touchRows, onEnd }: RoundPartProps) {
   const gear = useGear() ?? [];
   const rows = useRowActs(outing, roundNo, touchRows);
   const rowPaths = useRowPaths(field);
-  const setupLabel = (id: string): string => [...frame.setups, ...gear].find((setup) => setup.id === id)?.label ?? 'setup';
+  const setupLabel = (id: string): string =>
+    [...frame.setups, ...gear].find((setup) => setup.id === id)?.label ?? 'setup';
   const onAirOf = (target: StoredTarget) => field.onAir.get(target.id) ?? ALWAYS_ON;
   const nameOf = (id: string | null) => frame.targets.find((target) => target.id === id)?.fields.name ?? null;
   const edit = (entry: StoredReception): void => router.push(padForEdit(entry.id));

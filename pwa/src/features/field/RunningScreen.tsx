@@ -40,7 +40,7 @@ export function RunningScreen({ field, areRowsStill, touchRows }: RunningScreenP
   };
   useEffect(holdWakeLock, []);
   useClockWatch((step) => void act(() => actions.noteClockStep(outing, step)));
-  useNextRowInView(areRowsStill);
+  useNextRowInView(areRowsStill, field.roundNo);
   return (
     <div className="fd" data-hand={hand}>
       <ClockRow

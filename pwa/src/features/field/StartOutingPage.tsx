@@ -17,6 +17,7 @@ import { useAct } from './use-act';
 import { useFewFirst } from './use-few-first';
 import { useStartChoice, type StartChoice, type StartWishes } from './use-start-choice';
 import { othersSee } from './words';
+import './ui/start.css';
 
 const NO_LIST = 'none';
 
@@ -34,8 +35,14 @@ function Choices({ outings }: { readonly outings: OwnOutings }) {
   const router = useIonRouter();
   const [search] = useSearchParams();
   const [wishes, setWishes] = useState<StartWishes>({});
-  const siteId = wishes.siteId ?? search.get('site') ?? undefined;
-  const choice = useStartChoice(outings.newest, { ...wishes, siteId });
+  const madeSiteId = search.get('site');
+  const [seenSiteId, setSeenSiteId] = useState<string | null>(null);
+  if (madeSiteId !== null && madeSiteId !== seenSiteId) {
+    // made a moment ago from here: it is the one that was wanted, whatever was chosen before
+    setSeenSiteId(madeSiteId);
+    setWishes((known) => ({ ...known, siteId: madeSiteId }));
+  }
+  const choice = useStartChoice(outings.newest, wishes);
   const actions = useFieldActions();
   const act = useAct();
   if (choice === null) return null;
@@ -70,7 +77,7 @@ type SectionProps = { readonly choice: StartChoice; readonly wish: (change: Star
 
 function SiteSection({ choice, wish }: SectionProps) {
   const newSite = (
-    <ButtonLink look="quiet" to={paths.newSite()}>
+    <ButtonLink look="quiet" to={paths.newSite({ for: 'outing' })}>
       New site
     </ButtonLink>
   );

@@ -12,6 +12,7 @@ import { ReadyLine } from './ui/ReadyLine';
 import { useAct } from './use-act';
 import { useStartChoice, type StartChoice } from './use-start-choice';
 import { othersSee } from './words';
+import './ui/start.css';
 
 /** Without an outing: the last site and setup and one button; or, with nothing yet, one form that is enough. */
 export function StartScreen({ newest }: { readonly newest: StoredOuting | null }) {

@@ -26,8 +26,14 @@ import './sites.css';
 
 const SURROUNDINGS = ENVIRONMENTS.map((value) => ({ value, label: ENVIRONMENT_WORDS[value] }));
 
+type SiteFormProps = {
+  readonly view: SiteView | null;
+  /** Opened from the start of an outing, which takes the new site at once. */
+  readonly isForOuting?: boolean;
+};
+
 /** Makes a site, or changes one's own. */
-export function SiteForm({ view }: { readonly view: SiteView | null }) {
+export function SiteForm({ view, isForOuting = false }: SiteFormProps) {
   const saveSite = useSaveSite();
   const router = useIonRouter();
   const form = useSiteForm(view);
@@ -37,8 +43,9 @@ export function SiteForm({ view }: { readonly view: SiteView | null }) {
   async function submit(event: FormEvent): Promise<void> {
     event.preventDefault();
     if (!errors.report(faultsOfSite(values)) || !values.fix) return;
-    await saveSite(view?.site.id ?? null, { ...values, fix: values.fix });
-    leave();
+    const id = await saveSite(view?.site.id ?? null, { ...values, fix: values.fix });
+    if (isForOuting) router.push(paths.startOuting({ site: id }), 'back', 'pop');
+    else leave();
   }
   return (
     <form ref={errors.ref} noValidate onSubmit={(event) => void submit(event)}>

@@ -1,4 +1,5 @@
-import { useParams } from 'react-router-dom';
+import { useState } from 'react';
+import { useParams, useSearchParams } from 'react-router-dom';
 import { PageFrame } from '../../../design/page/PageFrame';
 import { EmptyState } from '../../../design/states/EmptyState';
 import { ButtonLink } from '../../../design/button/ButtonLink';
@@ -8,15 +9,18 @@ import { SiteForm } from './SiteForm';
 import { ENVIRONMENT_WORDS, placeSizeText } from './site-words';
 
 const BACK = { to: paths.sites(), label: 'Sites' };
+const BACK_TO_START = { to: paths.startOuting(), label: 'Start an outing' };
 
 /** One site: its owner's form, or what others may read of it. */
 export function SitePage() {
   const { id } = useParams();
+  const [search] = useSearchParams();
+  const [isForOuting] = useState(search.get('for') === 'outing');
   const view = useSite(isNewId(id) ? undefined : id);
   if (isNewId(id)) {
     return (
-      <PageFrame title="New site" back={BACK}>
-        <SiteForm view={null} />
+      <PageFrame title="New site" back={isForOuting ? BACK_TO_START : BACK}>
+        <SiteForm view={null} isForOuting={isForOuting} />
       </PageFrame>
     );
   }

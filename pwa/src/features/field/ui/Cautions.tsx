@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import { Button } from '../../../design/button/Button';
 import { Caution } from '../../../design/states/Caution';
+import './cautions.css';
 
 /** The reminders before an outing; local codes and licensed practice come first. */
 export function Cautions() {

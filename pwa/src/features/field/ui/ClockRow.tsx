@@ -5,6 +5,7 @@ import { UtcClock } from '../../../design/clock/UtcClock';
 import { nextTheme, setTheme, useTheme } from '../../../design/theme/theme';
 import { sunWords } from '../sun-words';
 import { clockWords } from '../words';
+import './clock-row.css';
 
 type ClockRowProps = {
   readonly trust: ClockTrust;

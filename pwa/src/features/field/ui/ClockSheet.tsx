@@ -8,6 +8,7 @@ import { utcHourMinute, withUnit } from '../../../platform/utc-text';
 import { useFieldActions } from '../data/use-field-actions';
 import { useAct } from '../use-act';
 import { aheadWords, clockWords } from '../words';
+import './clock-sheet.css';
 
 type ClockSheetProps = { readonly trust: ClockTrust; readonly nowMs: number; readonly onClose: () => void };
 

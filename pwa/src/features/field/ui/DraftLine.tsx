@@ -1,4 +1,5 @@
 import type { PadDraft } from '../data/pad-drafts';
+import './draft-line.css';
 
 type DraftLineProps = {
   readonly draft: PadDraft;

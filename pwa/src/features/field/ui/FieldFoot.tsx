@@ -4,6 +4,7 @@ import { formatFrequency } from '@harkmoor/sync-model/radio/bands/frequency-text
 import { SegmentedControl } from '../../../design/choice/SegmentedControl';
 import { paths } from '../../../platform/paths';
 import type { SetupChoice } from '../data/gear';
+import './field-foot.css';
 
 type FieldFootProps = {
   /** What was just done, with *Undo*, or a question; nothing above the keys otherwise. */

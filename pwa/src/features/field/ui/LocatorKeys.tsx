@@ -1,4 +1,5 @@
 import { locatorSigns, typedLocator } from '../locator-signs';
+import './locator-keys.css';
 
 type LocatorKeysProps = { readonly text: string; readonly onText: (text: string) => void };
 

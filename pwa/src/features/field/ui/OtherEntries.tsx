@@ -2,6 +2,7 @@ import { frequencyText } from '@harkmoor/sync-model/radio/bands/frequency-text';
 import { utcHourMinute } from '../../../platform/utc-text';
 import type { StoredReception } from '../data/outing-entries';
 import { outcomeWords, spokenFrequency } from '../words';
+import './other-entries.css';
 
 type OtherEntriesProps = {
   /** Entries outside the rounds, in the order in which they were made. */

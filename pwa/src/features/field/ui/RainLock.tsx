@@ -1,5 +1,6 @@
 import { useEffect, useRef, useState, type KeyboardEvent } from 'react';
 import { createPortal } from 'react-dom';
+import './rain-lock.css';
 
 const HOLD_MS = 2000;
 const LOCK_KEY = 'harkmoor.rain-lock';

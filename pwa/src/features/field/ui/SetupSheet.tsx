@@ -56,6 +56,7 @@ function TakeAlong({ taken, gear, onUse }: SetupSheetProps) {
           {label}
         </Button>
       ));
+  const own = keys(true);
   const shared = keys(false);
   const head = <h3 className="fd-sheet-head">Take another along</h3>;
   if (taken.length >= SETUPS_PER_OUTING_MAX) {
@@ -69,7 +70,7 @@ function TakeAlong({ taken, gear, onUse }: SetupSheetProps) {
   return (
     <>
       {head}
-      <div className="fd-sheet-list">{keys(true)}</div>
+      {own.length > 0 ? <div className="fd-sheet-list">{own}</div> : null}
       {shared.length > 0 ? (
         <details className="fd-more">
           <summary>With gear of others · {shared.length}</summary>

@@ -7,6 +7,7 @@ import type { StoredReception } from '../data/outing-entries';
 import type { StoredTarget } from '../data/outing-frame';
 import { useLongPress } from '../use-long-press';
 import { offAirWords, onAirWords, outcomeWords, spokenFrequency } from '../words';
+import './target-row.css';
 
 export type RowActs = {
   readonly onHeard: (target: StoredTarget, atMs: number) => void;
