@@ -16,8 +16,8 @@ export function Shell({ children }: { readonly children: ReactNode }) {
       <SideRail />
       <div className="shell-main">
         <div className="shell-pages">{children}</div>
-        <PhoneTabs />
         <UpdateLine />
+        <PhoneTabs />
       </div>
     </div>
   );

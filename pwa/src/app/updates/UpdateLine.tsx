@@ -6,8 +6,8 @@ import { sectionOf } from '../../platform/paths';
 import { applyUpdate, useUpdateReady } from './worker';
 
 /**
- * "A new version is ready", over the tabs. Not in Field, where the thumb is busy and nothing may move: there it waits
- * for the next moment when the phone is put away.
+ * "A new version is ready", between the page and the tabs, so that it covers no form's own keys. Not in Field, where
+ * the thumb is busy and nothing may move: there it waits for the next moment when the phone is put away.
  */
 export function UpdateLine() {
   const isReady = useUpdateReady();
@@ -22,7 +22,7 @@ export function UpdateLine() {
     ? 'A new version is ready. Save or leave the open form first; then it comes by itself.'
     : 'A new version is ready.';
   return (
-    <div className="hm-notice-float">
+    <div className="shell-update">
       <NoticeLine
         text={isReady && !isPutOff && !isInField ? text : null}
         actionLabel="Use it now"
