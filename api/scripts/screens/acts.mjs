@@ -24,11 +24,14 @@ export function typeFrequency(text) {
   return (page) => page.getByRole('textbox', { name: /^Frequency in kHz/ }).fill(text);
 }
 
+/** The pad takes no tap before: a script that tries makes the page scroll. */
+const PAD_WAKES_MS = 450;
 const COLUMNS = ['strength', 'interference', 'noise', 'propagation', 'overall'];
 
 /** Touches the first columns of the score pad. */
 export function scorePad(figures) {
   return async (page) => {
+    await page.waitForTimeout(PAD_WAKES_MS);
     for (const [index, figure] of [...figures].entries())
       await page
         .getByRole('radiogroup', { name: COLUMNS[index], exact: true })
