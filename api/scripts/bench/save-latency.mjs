@@ -49,8 +49,9 @@ async function openPad(page, kHz) {
 
 /** Runs in the page before its own code: notes when a transaction that may write receptions is complete. */
 function noteWrites() {
-  const open = IDBDatabase.prototype.transaction;
-  IDBDatabase.prototype.transaction = function (stores, mode, options) {
+  const { prototype } = globalThis.IDBDatabase;
+  const open = prototype.transaction;
+  prototype.transaction = function (stores, mode, options) {
     const transaction = open.call(this, stores, mode, options);
     if (mode === 'readwrite' && [stores].flat().includes('reception'))
       transaction.addEventListener('complete', () => (globalThis.receptionStoredMs = performance.now()));
