@@ -45,17 +45,13 @@ export const TargetRow = memo(function TargetRow(props: TargetRowProps) {
       className={row.isNext ? 'fd-row fd-row-next' : 'fd-row'}
       aria-current={row.isNext ? 'step' : undefined}
     >
-      <button
-        type="button"
-        className="fd-what"
-        aria-label={`More about ${spoken}`}
-        onClick={() => acts.onMore(target)}
-      >
+      <button type="button" className="fd-what" onClick={() => acts.onMore(target)}>
         <span className="fd-frequency num">
           {figure} <small>{unit}</small>
         </span>
         <span className="fd-name">{name}</span>
         {detail ? <span className="fd-detail num">{detail}</span> : null}
+        <span className="only-heard">More</span>
       </button>
       <Answers {...props} spoken={spoken} />
     </li>

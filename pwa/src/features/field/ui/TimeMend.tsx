@@ -19,11 +19,11 @@ export function TimeMend({ outcome, atMs, tappedMs, onTime }: TimeMendProps) {
       <span className="num" role="status">
         {WORDS[outcome]} <b>{utcTime(atMs)}</b> UTC
       </span>
-      <button type="button" aria-label="One minute earlier" onClick={() => onTime(atMs - MINUTE_MS)}>
-        −1 min
+      <button type="button" onClick={() => onTime(atMs - MINUTE_MS)}>
+        −1 min<span className="only-heard"> earlier</span>
       </button>
-      <button type="button" aria-label="Five minutes earlier" onClick={() => onTime(atMs - 5 * MINUTE_MS)}>
-        −5 min
+      <button type="button" onClick={() => onTime(atMs - 5 * MINUTE_MS)}>
+        −5 min<span className="only-heard"> earlier</span>
       </button>
       {atMs === tappedMs ? null : (
         <button type="button" onClick={() => onTime(tappedMs)}>
