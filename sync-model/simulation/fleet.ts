@@ -6,7 +6,7 @@ import { checkConverged, checkCursors, checkNothingReferredDeleted, checkSave } 
 import { HubProcess } from './hub-process.js';
 import { MemoryHub, type SaveWatcher } from './memory-hub.js';
 import { createNetwork, type Network } from './network.js';
-import { checkReadsOwnWrites, Oracle, type Violation } from './oracle.js';
+import { checkReadsOwnWrites, Oracle } from './oracle.js';
 import type { PlantedFault } from './planted-faults.js';
 import { changeMembership, PHONES, startClubs } from './people.js';
 import { Phone } from './phone.js';
