@@ -51,7 +51,11 @@ export function PageFrame(props: PageFrameProps) {
       <IonContent scrollY={scrolls}>
         <div className={scrolls ? column : 'hm-fill'}>{props.children}</div>
       </IonContent>
-      {props.foot ? <div className="hm-page-foot">{props.foot}</div> : null}
+      {props.foot ? (
+        <section className="hm-page-foot" aria-label="Keys">
+          {props.foot}
+        </section>
+      ) : null}
     </IonPage>
   );
 }
