@@ -2,8 +2,8 @@ import fs from 'node:fs';
 import path from 'node:path';
 import { pathToFileURL } from 'node:url';
 
-const SHOWN_WIDTH_PX = { phone: 260, laptop: 560 };
-const COLUMNS = { phone: 7, laptop: 3 };
+const SHOWN_WIDTH_PX = { phone: 260, laptop: 480 };
+const COLUMNS = { phone: 7, laptop: 5 };
 
 /** Puts the pictures of one theme and size on one sheet, drawn by the browser. Resolves to the path of its PNG. */
 export async function makeContactSheet(browser, { folder, theme, size, pictures }) {
