@@ -1,4 +1,3 @@
-import type { Stamp } from '../stamp/stamp.js';
 import { CHECK_REACH_MS, type TimeCheck } from './corrected-time.js';
 
 /** What may be said of a device's clock at this moment. */
@@ -10,26 +9,21 @@ export type ClockTrust =
   | { kind: 'stepped'; stepAt: number; stepMs: number }
   | { kind: 'unchecked' };
 
-/** A check with the stamp of its writing, which tells before from after even when the clock was put back. */
-export type StampedCheck = TimeCheck & { readonly stamp?: Stamp };
-
 /**
- * The state of one device's clock from its own checks and the jumps seen on it, in the order in which they were seen,
- * at `nowMs` of that clock. A step belongs to the time after it, so a check at the very instant of a step was made on
- * the new clock. A clock that was put back shows some minutes twice: where stamps are given (`stepsStamp` is that of
- * the last step), they say what came first, for stamps of one device never run back.
+ * The state of one device's clock from its own checks and the jumps seen on it, at `nowMs` of that clock. A step
+ * belongs to the time after it, so a check at the very instant of a step was made on the new clock.
  */
 export function clockTrust(
-  checks: readonly StampedCheck[],
+  checks: readonly TimeCheck[],
   steps: readonly { at: number; stepMs: number }[],
   nowMs: number,
-  stepsStamp?: Stamp,
 ): ClockTrust {
-  const check = newest(checks.filter(({ deleted }) => !deleted));
-  const step = steps.at(-1);
-  const isCheckedSince =
-    step && check && (stepsStamp && check.stamp ? check.stamp > stepsStamp : check.deviceAt >= step.at);
-  if (step && !isCheckedSince && nowMs - step.at <= CHECK_REACH_MS) {
+  const check = latest(
+    checks.filter(({ deleted }) => !deleted),
+    (one) => one.deviceAt,
+  );
+  const step = latest(steps, (one) => one.at);
+  if (step && nowMs - step.at <= CHECK_REACH_MS && (!check || step.at > check.deviceAt)) {
     return { kind: 'stepped', stepAt: step.at, stepMs: step.stepMs };
   }
   if (!check) return { kind: 'unchecked' };
@@ -37,13 +31,9 @@ export function clockTrust(
   return { kind: ageMs > CHECK_REACH_MS ? 'old' : 'checked', check, ageMs };
 }
 
-function newest(checks: readonly StampedCheck[]): StampedCheck | undefined {
-  return checks.reduce<StampedCheck | undefined>(
-    (best, check) => (best === undefined || isNewer(check, best) ? check : best),
+function latest<T>(items: readonly T[], timeOf: (item: T) => number): T | undefined {
+  return items.reduce<T | undefined>(
+    (best, item) => (best === undefined || timeOf(item) > timeOf(best) ? item : best),
     undefined,
   );
-}
-
-function isNewer(a: StampedCheck, b: StampedCheck): boolean {
-  return a.stamp && b.stamp ? a.stamp > b.stamp : a.deviceAt > b.deviceAt;
 }

@@ -47,7 +47,7 @@ export function useRunningField(outing: StoredOuting, areRowsStill: boolean): Ru
   const targets = useStillWhile(areRowsStill, frame?.targets);
   return useMemo(() => {
     if (!frame || !allEntries || !memory || !checks || !targets) return null;
-    const trust = clockTrust(checks, outing.fields.clockSteps, minuteMs, stampOf(outing, 'clockSteps'));
+    const trust = clockTrust(checks, outing.fields.clockSteps, minuteMs);
     const trueMs = minuteMs + (trust.kind === 'checked' ? trust.check.offsetMs : 0);
     const entries = allEntries.filter(({ fields }) => !fields.deleted);
     const roundNo = currentRoundNo(entries, memory.roundNo);

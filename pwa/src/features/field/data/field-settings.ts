@@ -7,6 +7,7 @@ import type { UndoableAct } from './last-act';
 /** What this phone alone remembers of an outing; nothing of it is sent. */
 export const FIELD_SETTING = {
   lastOutingId: (clubId: string) => `field.last-outing.${clubId}`,
+  outdatedChecks: (clubId: string) => `field.outdated-checks.${clubId}`,
   outing: (outingId: string) => `field.outing.${outingId}`,
 } as const;
 

@@ -7,6 +7,7 @@ import {
 } from '@harkmoor/sync-model/records/outing-from-start';
 import type { WriteStep } from '../../../store/log-writer';
 import type { OpenLog } from '../../../store/open-log';
+import { outdateChecks } from './clock-checks';
 import { changeOutingMemory, FIELD_SETTING } from './field-settings';
 import { readEntries } from './outing-entries';
 import { readOwnOutings, type StoredOuting } from './running-outing';
@@ -97,6 +98,8 @@ export async function noteClockStep(
   outing: StoredOuting,
   step: { at: number; stepMs: number },
 ): Promise<void> {
+  // first: killed between the two, the phone asks for a check too often rather than trust an outdated one
+  await outdateChecks(log, step.at);
   const clockSteps = [...outing.fields.clockSteps, step].slice(-200);
   await log.writer.edit('outing', outing.id, { clockSteps });
 }

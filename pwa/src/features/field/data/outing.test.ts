@@ -1,9 +1,11 @@
 // @vitest-environment jsdom
 import { beforeEach, describe, expect, it } from 'vitest';
+import { clockTrust } from '@harkmoor/sync-model/evidence/clock-trust';
 import type { OpenLog } from '../../../store/open-log';
+import { readOwnChecks, saveClockCheck } from './clock-checks';
 import { readEntries } from './outing-entries';
 import { nilIn, outingOnAPhone } from './outing-on-a-phone';
-import { endOuting, startOuting, switchSetup } from './outing-writer';
+import { endOuting, noteClockStep, startOuting, switchSetup } from './outing-writer';
 import { readOwnOutings, type StoredOuting } from './running-outing';
 
 let log: OpenLog;
@@ -55,5 +57,21 @@ describe('the setup switch', () => {
     await nilIn(log, now);
     const setups = (await readEntries(log, outing.id)).map(({ fields }) => fields.setupId);
     expect(setups).toEqual([outing.fields.currentSetupId, other]);
+  });
+});
+
+describe('a jump of the clock', () => {
+  it('should outdate the checks made before it, also those whose minute comes a second time, and no later one', async () => {
+    const nowMs = Date.now();
+    const check = { offsetMs: 86, uncertaintyMs: 500, method: 'server', pathKm: null } as const;
+    await saveClockCheck(log, { ...check, deviceAt: nowMs });
+    expect(await readOwnChecks(log, nowMs)).toHaveLength(1);
+    const putBack = { at: nowMs - 420_000, stepMs: -420_000 };
+    await noteClockStep(log, outing, putBack);
+    const { clockSteps } = (await running()).fields;
+    expect(clockTrust(await readOwnChecks(log, putBack.at), clockSteps, putBack.at).kind).toBe('stepped');
+    await saveClockCheck(log, { ...check, deviceAt: putBack.at + 60_000, offsetMs: 420_086 });
+    const trust = clockTrust(await readOwnChecks(log, putBack.at), clockSteps, putBack.at + 60_000);
+    expect(trust).toMatchObject({ kind: 'checked', check: { offsetMs: 420_086 } });
   });
 });
