@@ -27,6 +27,7 @@ clientsClaim(); // the first visit is controlled without a reload
 self.addEventListener('message', (event) => {
   const message = event.data as { type?: string } | null;
   if (message?.type === 'SKIP_WAITING') void self.skipWaiting();
+  if (message?.type === 'CLAIM') event.waitUntil(self.clients.claim());
   if (message?.type === 'COUNT_MISSING') event.waitUntil(answerMissing(event.ports[0]));
 });
 

@@ -27,7 +27,11 @@ export async function registerWorker(): Promise<void> {
     tellAll();
   });
   followVisibility(workbox);
-  void navigator.serviceWorker.ready.then(() => whenIdle(() => void keepFineMap()));
+  void navigator.serviceWorker.ready.then(({ active }) => {
+    // a page that was just being opened when the worker claimed all pages was passed over
+    if (!navigator.serviceWorker.controller) active?.postMessage({ type: 'CLAIM' });
+    whenIdle(() => void keepFineMap());
+  });
   await workbox.register();
 }
 
