@@ -18,7 +18,7 @@ export async function addAntennaSetup({ page }: Device, name: string, kind: stri
 export async function takeAlong({ page }: Device, antenna: string): Promise<void> {
   await goTo(page, 'Field');
   await page.getByRole('button', { name: 'Setups: add or mend' }).click();
-  await page.getByRole('button', { name: new RegExp(`^${antenna} · `) }).click();
+  await page.getByRole('button', { name: new RegExp(`^${antenna}( · |$)`) }).click();
   await page.getByRole('radio', { name: antenna, checked: true }).waitFor();
 }
 
