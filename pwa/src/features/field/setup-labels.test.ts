@@ -28,3 +28,8 @@ it('should add the receiver, then the owner, only where setups would read alike'
     'Whip',
   ]);
 });
+
+it('should name the receiver always where that is asked for', () => {
+  const [whip] = withLabels([setup('Whip', 'Grey portable', 'Asta')], 2);
+  expect(whip!.label).toBe('Whip · Grey portable');
+});

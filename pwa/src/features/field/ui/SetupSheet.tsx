@@ -47,6 +47,7 @@ export function SetupSheet(props: SetupSheetProps) {
 function TakeAlong({ taken, gear, onUse }: SetupSheetProps) {
   const others = withLabels(
     gear.filter(({ id, isOffered }) => isOffered && !taken.some((one) => one.id === id)),
+    2,
   );
   const keys = (isOwn: boolean) =>
     others
