@@ -18,7 +18,10 @@ const RENEW_AFTER_MS = 12 * 60_000;
 const REFRESH_TIMEOUT_MS = 20_000;
 
 let held: Held | null = null;
-let renewing: Promise<TokenAnswer> | null = null;
+/** One renewal an account: what one account's renewal answers is never handed to another that asks meanwhile. */
+const renewing = new Map<string, Promise<TokenAnswer>>();
+/** Counts sign-outs, so that a renewal which was under way then leaves no token behind. */
+let signOuts = 0;
 const listeners = new Set<(body: SignInBody) => void>();
 
 export function keepAccessToken(accountId: string, token: string): void {
@@ -27,6 +30,7 @@ export function keepAccessToken(accountId: string, token: string): void {
 
 export function dropAccessToken(): void {
   held = null;
+  signOuts += 1;
 }
 
 /** Called with each refresh answer: it tells changes of name, confirmation and clubs. */
@@ -40,10 +44,11 @@ export async function accessTokenFor(accountId: string, after?: string): Promise
   if (held?.accountId === accountId && held.token !== after && performance.now() < held.renewAtMs) {
     return { kind: 'token', token: held.token };
   }
-  renewing ??= renewAcrossTabs(accountId).finally(() => {
-    renewing = null;
-  });
-  return renewing;
+  const underWay = renewing.get(accountId);
+  if (underWay) return underWay;
+  const renewal = renewAcrossTabs(accountId).finally(() => renewing.delete(accountId));
+  renewing.set(accountId, renewal);
+  return renewal;
 }
 
 /** Two tabs that renewed at once would look like a stolen cookie; the lock makes them take turns. */
@@ -53,6 +58,7 @@ function renewAcrossTabs(accountId: string): Promise<TokenAnswer> {
 }
 
 async function renew(accountId: string): Promise<TokenAnswer> {
+  const signOutsBefore = signOuts;
   let response: Response;
   try {
     response = await fetch('/api/accounts/refresh', {
@@ -64,10 +70,10 @@ async function renew(accountId: string): Promise<TokenAnswer> {
   } catch {
     return { kind: 'unreachable' };
   }
-  if (response.status === 401) return { kind: 'signed-out' };
+  if (response.status === 401 && isJson(response)) return { kind: 'signed-out' };
   const body = response.ok ? await readSignIn(response) : null;
   if (!body) return { kind: 'unreachable' };
-  if (body.account.id !== accountId) return { kind: 'signed-out' };
+  if (body.account.id !== accountId || signOuts !== signOutsBefore) return { kind: 'signed-out' };
   keepAccessToken(accountId, body.accessToken);
   for (const listener of listeners) listener(body);
   return { kind: 'token', token: body.accessToken };
@@ -75,7 +81,7 @@ async function renew(accountId: string): Promise<TokenAnswer> {
 
 /** Null for a captive portal's page, a broken body, or anything else that is no answer of ours. */
 async function readSignIn(response: Response): Promise<SignInBody | null> {
-  if (!response.headers.get('content-type')?.includes('application/json')) return null;
+  if (!isJson(response)) return null;
   try {
     const body = (await response.json()) as Partial<SignInBody>;
     const isWhole = typeof body.accessToken === 'string' && typeof body.account?.id === 'string';
@@ -83,4 +89,9 @@ async function readSignIn(response: Response): Promise<SignInBody | null> {
   } catch {
     return null;
   }
+}
+
+/** Our API refuses in JSON; a portal that wants its own sign-in does not, and ends nobody's session here. */
+export function isJson(response: Response): boolean {
+  return response.headers.get('content-type')?.includes('application/json') === true;
 }
