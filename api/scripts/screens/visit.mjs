@@ -64,7 +64,8 @@ async function look({ page, workPage, screen, found, theme, size, folder }) {
 
 /** A fresh opening in the theme: what the application paints first is part of what is looked at. */
 async function open(page, address, theme) {
-  await page.evaluate(() => localStorage.removeItem('harkmoor.rain-lock')).catch(() => {}); // a lock outlives a reload
+  // a rain lock outlives a reload
+  await page.evaluate(() => sessionStorage.removeItem('harkmoor.rain-lock')).catch(() => {});
   await page.goto(address);
   const isThemed = await page.evaluate(
     (value) =>
