@@ -110,7 +110,7 @@ function DoneAnswer(props: TargetRowProps & { readonly spoken: string; readonly 
     <button
       type="button"
       className="fd-done num"
-      aria-label={`${words}, ${spoken}, ${setupLabel}, ${time} UTC. Edit`}
+      aria-label={`${words} ${setupLabel} · ${time} UTC, ${spoken}. Edit`}
       onClick={() => acts.onEdit(entry)}
     >
       <b>{words}</b>
