@@ -54,6 +54,6 @@ describe('a guest', () => {
     for (const figure of '6070') await tap('button', figure);
     await tap('button', /^Heard, /);
     await tap('button', /^Save/);
-    await page.getByRole('button', { name: /^Heard, 6070 kilohertz.*Edit$/ }).waitFor();
+    await field.otherEntry(page, '6070', 'Heard').waitFor();
   }
 });

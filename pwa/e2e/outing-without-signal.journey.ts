@@ -53,10 +53,10 @@ describe('an outing without signal', () => {
 
   /** The fourth: its overall figure is put right from nothing to 2. */
   async function mendAnEntry({ page }: Device): Promise<void> {
-    await page.getByRole('button', { name: /^2222X, 9420 kilohertz/ }).click();
+    await field.otherEntry(page, '9420', '2222X').click();
     await field.score(page, '....2');
     await page.getByRole('button', { name: 'Save 22222' }).click();
-    await page.getByRole('button', { name: /^22222, 9420 kilohertz/ }).waitFor();
+    await field.otherEntry(page, '9420', '22222').waitFor();
   }
 
   async function secondRoundWithTheWhip(phone: Device): Promise<void> {
@@ -74,7 +74,7 @@ describe('an outing without signal', () => {
     await draft.getByRole('button', { name: 'Continue' }).click();
     await phone.page.getByRole('radio', { name: /^strength 4/, checked: true }).waitFor();
     await phone.page.getByRole('button', { name: 'Save 4X4X3' }).click();
-    await phone.page.getByRole('button', { name: /^4X4X3, 7205 kilohertz/ }).waitFor();
+    await field.otherEntry(phone.page, '7205', '4X4X3').waitFor();
   }
 
   async function othersSeeIt(other: Device, founder: Parameters<typeof signedInElsewhere>[0]): Promise<void> {

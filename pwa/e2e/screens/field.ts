@@ -1,4 +1,4 @@
-import type { Page } from 'playwright-core';
+import type { Locator, Page } from 'playwright-core';
 import type { Device } from '../stage/browser';
 
 /** Waits until Settings says that the whole application is on the device. */
@@ -81,4 +81,10 @@ export async function savePad(page: Page): Promise<void> {
 
 async function fieldIsBack(page: Page): Promise<void> {
   await page.getByRole('link', { name: 'Other frequency, kHz' }).waitFor();
+}
+
+/** An entry in Field's list of what was entered beside the rounds: "9420" with its outcome, such as "22222" or "Nil". */
+export function otherEntry(page: Page, kHz: string, outcome: string): Locator {
+  const figure = kHz.replace(/(\d)(\d{3})$/, '$1\\s$2');
+  return page.getByRole('button', { name: new RegExp(`^${figure}\\skHz.*\\b${outcome}\\b.*Edit$`) });
 }

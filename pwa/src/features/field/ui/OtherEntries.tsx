@@ -1,7 +1,7 @@
 import { frequencyText } from '@harkmoor/sync-model/radio/bands/frequency-text';
 import { utcHourMinute } from '../../../platform/utc-text';
 import type { StoredReception } from '../data/outing-entries';
-import { outcomeWords, spokenFrequency } from '../words';
+import { outcomeWords } from '../words';
 import './other-entries.css';
 
 type OtherEntriesProps = {
@@ -33,12 +33,7 @@ export function OtherEntries({ entries, setupLabel, targetName, onEdit }: OtherE
           const words = outcomeWords(entry.fields);
           return (
             <li key={entry.id}>
-              <button
-                type="button"
-                className="fd-other-entry num"
-                aria-label={`${words}, ${spokenFrequency(tuning.dialHz)}${name ? `, ${name}` : ''}, ${utcHourMinute(deviceAt)} UTC. Edit`}
-                onClick={() => onEdit(entry)}
-              >
+              <button type="button" className="fd-other-entry num" onClick={() => onEdit(entry)}>
                 <span>
                   <b>{frequencyText(tuning.dialHz)}</b>
                   <small>{[name, BASIS_WORDS[basis]].filter(Boolean).join(' · ')}</small>
@@ -47,6 +42,7 @@ export function OtherEntries({ entries, setupLabel, targetName, onEdit }: OtherE
                   <b>{words}</b>
                   <small>
                     {setupLabel(setupId)} · {utcHourMinute(deviceAt)}
+                    <span className="only-heard"> UTC. Edit</span>
                   </small>
                 </span>
               </button>

@@ -107,15 +107,11 @@ function DoneAnswer(props: TargetRowProps & { readonly spoken: string; readonly 
   const words = outcomeWords(entry.fields);
   const time = utcHourMinute(entry.fields.deviceAt);
   return (
-    <button
-      type="button"
-      className="fd-done num"
-      aria-label={`${words} ${setupLabel} · ${time} UTC, ${spoken}. Edit`}
-      onClick={() => acts.onEdit(entry)}
-    >
+    <button type="button" className="fd-done num" onClick={() => acts.onEdit(entry)}>
       <b>{words}</b>
       <small>
         {setupLabel} · {time}
+        <span className="only-heard"> UTC, {spoken}. Edit</span>
       </small>
     </button>
   );
