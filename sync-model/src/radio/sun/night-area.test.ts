@@ -51,11 +51,12 @@ describe('the night side as a ring', () => {
     fc.assert(
       fc.property(anyInstant, anywhere, (atMs, point) => {
         const altitudeDeg = sunAltitudeDeg(point, atMs);
-        // Between two points of the ring the flat map cuts a corner of less than 0.3 degrees.
-        fc.pre(Math.abs(altitudeDeg) > 0.3);
+        // Between two points of the ring the flat map cuts a corner of less than 0.3 degrees; beside a pole, where
+        // one step of arc spans many longitudes, of up to that step of 2 degrees.
+        fc.pre(Math.abs(altitudeDeg) > (Math.abs(point.latDeg) > 80 ? 2 : 0.3));
         expect(holds(nightRing(atMs, 2), point)).toBe(altitudeDeg < 0);
       }),
-      { numRuns: 1000 },
+      { numRuns: 1000, examples: [[2026479770089, { latDeg: -88.99999992670315, lonDeg: 0 }]] },
     );
   });
 
