@@ -31,16 +31,16 @@ export class DeviceSession {
   @Property({ type: WholeNumberType })
   lastSeenAt: number;
 
-  @Property({ type: 'string', nullable: true })
+  @Property({ type: 'text', nullable: true })
   currentHash: string | null = null;
 
-  @Property({ type: 'string' })
+  @Property({ type: 'text' })
   pendingHash: string;
 
   @Property({ type: WholeNumberType, nullable: true })
   endedAt: number | null = null;
 
-  @Property({ type: 'string', nullable: true })
+  @Property({ type: 'text', nullable: true })
   endReason: SessionEnd | null = null;
 
   constructor(made: {

@@ -14,13 +14,13 @@ export class MailToken {
   @PrimaryKey({ type: 'uuid' })
   readonly id: string;
 
-  @Property({ type: 'string' })
+  @Property({ type: 'text' })
   readonly tokenHash: string;
 
   @Property({ type: 'uuid' })
   readonly accountId: string;
 
-  @Property({ type: 'string' })
+  @Property({ type: 'text' })
   readonly purpose: MailTokenPurpose;
 
   @Property({ type: WholeNumberType })

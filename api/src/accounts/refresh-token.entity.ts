@@ -4,7 +4,7 @@ import { WholeNumberType } from '../platform/database/whole-number-type.js';
 /** That a token was given out by a session: what tells a spent token from an invented one. */
 @Entity({ tableName: 'refresh_token' })
 export class RefreshToken {
-  @PrimaryKey({ type: 'string' })
+  @PrimaryKey({ type: 'text' })
   readonly tokenHash: string;
 
   @Property({ type: 'uuid' })

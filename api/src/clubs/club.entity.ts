@@ -13,7 +13,7 @@ export class Club {
   @PrimaryKey({ type: 'uuid', fieldName: 'club_id' })
   readonly id: string;
 
-  @Property({ type: 'string' })
+  @Property({ type: 'text' })
   readonly kind: ClubKind;
 
   @Property({ type: 'string', length: 60 })
@@ -37,7 +37,7 @@ export class Club {
   @Property({ type: WholeNumberType })
   readonly createdAt: number;
 
-  @Property({ type: 'string', nullable: true })
+  @Property({ type: 'text', nullable: true })
   joinCodeHash: string | null = null;
 
   @Property({ type: WholeNumberType, nullable: true })

@@ -16,7 +16,7 @@ export class Membership {
   @Property({ type: 'string', length: 60 })
   readonly name: string;
 
-  @Property({ type: 'string' })
+  @Property({ type: 'text' })
   role: Role;
 
   @Property({ type: WholeNumberType })
@@ -28,7 +28,7 @@ export class Membership {
   @Property({ type: WholeNumberType })
   seq: number;
 
-  @Property({ type: 'string', length: 24 })
+  @Property({ type: 'string', columnType: 'char(24)' })
   stamp: Stamp;
 
   constructor(made: {

@@ -12,7 +12,7 @@ export class OutgoingMail {
   @PrimaryKey({ type: 'uuid' })
   readonly id: string;
 
-  @Property({ type: 'string' })
+  @Property({ type: 'text' })
   readonly kind: MailKind;
 
   @Property({ type: 'string', length: 254 })

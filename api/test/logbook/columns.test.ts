@@ -60,6 +60,18 @@ function fieldSchema(field: z.ZodType): { schema: JsonSchema; nullable: boolean 
   return { schema: nullable && rest.length === 1 ? rest[0]! : whole, nullable };
 }
 
+/** A type of the mapper's in the words of PostgreSQL's catalogue. */
+function asCatalogued(type: string): string {
+  const [, name, length = '', list = ''] = /^([a-z ]+?)(\(\d+\))?(\[\])?$/.exec(type) ?? [];
+  return `${CATALOGUE_NAMES[name ?? ''] ?? name}${length}${list}`;
+}
+const CATALOGUE_NAMES: Readonly<Record<string, string>> = {
+  varchar: 'character varying',
+  char: 'character',
+  int: 'integer',
+  timestamptz: 'timestamp with time zone',
+};
+
 describe('the tables of the logbook', () => {
   it.each(WRITABLE_TYPES)('should hold each field of a %s in a column of a fitting type', async (type) => {
     const table = recordTables(orm.getMetadata()).find((candidate) => candidate.type === type)!;
@@ -91,17 +103,21 @@ describe('the tables of the logbook', () => {
     expect([...(await columnsOf(table.table)).keys()].sort()).toEqual(expected.sort());
   });
 
-  it('should name to the mapper exactly the columns that the database has', async () => {
+  it('should name to the mapper exactly the tables and columns that the database has, with their types', async () => {
+    const named: string[] = [];
     for (const { tableName, props } of Object.values(orm.getMetadata().getAll())) {
-      if (!tableName) continue;
-      const columns = await columnsOf(tableName);
-      const named = props.flatMap(({ fieldNames, nullable }) =>
-        (fieldNames ?? []).map((name) => `${name} ${nullable ? 'YES' : 'NO'}`),
-      );
-      expect(named.sort()).toEqual(
-        [...columns.values()].map((c) => `${c.column_name} ${c.is_nullable}`).sort(),
-      );
+      for (const { fieldNames, columnTypes, nullable } of tableName ? props : []) {
+        const [name, type] = [fieldNames?.[0], asCatalogued(columnTypes?.[0] ?? '')];
+        if (name) named.push(`${tableName}.${name} ${type}${nullable ? ' or null' : ''}`);
+      }
     }
+    const found = await orm.em.getConnection().execute<{ column: string }[]>(`
+      select relname || '.' || attname || ' ' || format_type(atttypid, atttypmod)
+        || case when attnotnull then '' else ' or null' end as column
+      from pg_attribute join pg_class on pg_class.oid = attrelid
+      where relnamespace = current_schema::regnamespace and relkind = 'r' and attnum > 0 and not attisdropped
+        and relname <> 'mikro_orm_migrations'`);
+    expect(named.sort()).toEqual(found.map(({ column }) => column).sort());
   });
 
   it('should begin every key and foreign key of club data with the club', async () => {

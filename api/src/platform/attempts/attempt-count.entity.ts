@@ -19,7 +19,7 @@ export const REMEMBERED_MS = 3_600_000;
 /** How often something was tried of late; the key is a keyed hash, so that the table names nobody. */
 @Entity({ tableName: 'attempt_count' })
 export class AttemptCount {
-  @PrimaryKey({ type: 'string' })
+  @PrimaryKey({ type: 'text' })
   readonly keyHash: string;
 
   @Property({ type: 'integer' })
