@@ -107,12 +107,18 @@ it('should hear nothing in the page of a portal', async () => {
 });
 
 it('should stop where the account is signed out', async () => {
-  status = 401;
+  [status, type] = [401, 'application/json'];
   listen();
   await until(() => asked.length >= 2);
   const attempts = asked.length;
   await new Promise((resolve) => setTimeout(resolve, 2500));
   expect(asked).toHaveLength(attempts);
+});
+
+it('should go on trying where a portal asks for a sign-in of its own', async () => {
+  [status, type] = [401, 'text/html'];
+  listen();
+  await until(() => asked.length >= 4);
 });
 
 it('should always wait between one second and five minutes, longer after more failures', () => {

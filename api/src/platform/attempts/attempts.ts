@@ -30,7 +30,8 @@ export class Attempts {
         { keyHash },
         { lockMode: LockMode.PESSIMISTIC_WRITE },
       );
-      return count.take(rule, nowMs);
+      // read under the lock: of parallel tries, none counts from a moment before the one that it waits for
+      return count.take(rule, this.clock.nowMs());
     });
     return waitMs > 0 ? waitRefusal(waitMs) : null;
   }
