@@ -27,7 +27,7 @@ export function useFrequencyAnswers(outing: StoredOuting) {
 
   const openPad = (means: 'planned' | 'chance'): void => {
     const { frequencyHz: dialHz, mode } = entry;
-    if (dialHz === null || !guard.current.accepts('answer', performance.now())) return;
+    if (dialHz === null || !guard.current.accepts(answerKey(dialHz), performance.now())) return;
     buzz();
     const entered = { dialHz, mode, means, targetId: target?.id ?? null };
     // the pad takes this page's place in the history: back from it leads to Field
@@ -35,13 +35,19 @@ export function useFrequencyAnswers(outing: StoredOuting) {
   };
   const logNil = (): void => {
     const subject = plannedSubject(entry, target);
-    if (subject === null || !guard.current.accepts('answer', performance.now())) return;
+    if (subject === null || entry.frequencyHz === null) return;
+    if (!guard.current.accepts(answerKey(entry.frequencyHz), performance.now())) return;
     buzz();
     const tap = { outcome: 'nil' as const, subject, outingId: outing.id, outing: outing.fields };
     const deviceAtMs = Date.now();
     void act(() => actions.logTap({ ...tap, deviceAtMs })).then((isDone) => isDone && goToField());
   };
   return { entry, target, openPad, logNil };
+}
+
+/** A quick answer on another frequency is another answer, no trembling thumb. */
+function answerKey(frequencyHz: number): string {
+  return String(frequencyHz);
 }
 
 function plannedSubject(entry: FrequencyEntry, target: StoredTarget | null): TapSubject | null {
