@@ -1,6 +1,6 @@
 import type { StoredRecord } from '@harkmoor/sync-model/device/stored-record';
-import { isWritableType, WRITABLE_TYPES } from '@harkmoor/sync-model/records/record-types';
-import { isStamp } from '@harkmoor/sync-model/stamp/stamp';
+import { WRITABLE_TYPES } from '@harkmoor/sync-model/records/record-types';
+import { withUnsent } from '@harkmoor/sync-model/device/unsent-record';
 import type { OpenLog } from '../../../store/open-log';
 import { readOwed } from '../../../store/owed';
 
@@ -36,11 +36,12 @@ export async function unsentFile(
 export type ReadIn = { kind: 'read'; added: number; known: number } | { kind: 'refused'; message: string };
 
 /**
- * Reads such a file into the open log. All or nothing: a file with one broken record changes nothing. A record that
- * is on the phone already is left as it is.
+ * Reads such a file into the open log. All or nothing: a file with one broken record changes nothing. What the phone
+ * holds already keeps its later values and takes over those that were not sent.
  */
 export async function readInUnsentFile(log: OpenLog, text: string): Promise<ReadIn> {
-  const file = parseFile(text);
+  const { wholeRecord } = await import('./unsent-schema');
+  const file = parseFile(text, wholeRecord);
   if (typeof file === 'string') return { kind: 'refused', message: file };
   const accountId = log.account?.id ?? null;
   if (file.accountId !== null && file.accountId !== accountId) {
@@ -52,13 +53,14 @@ export async function readInUnsentFile(log: OpenLog, text: string): Promise<Read
   const clubIds = new Set((await log.database.clubs.toArray()).map((club) => club.clubId));
   const records = file.records.map((record) => ({
     ...record,
-    ownerId: accountId,
+    // what the server never had becomes the reader's own; what it has keeps the owner that it told
+    ownerId: record.seq === 0 ? accountId : record.ownerId,
     clubId: clubIds.has(record.clubId) ? record.clubId : log.myLogId,
   }));
-  return addAbsent(log, records);
+  return takeIn(log, records);
 }
 
-async function addAbsent(log: OpenLog, records: readonly StoredRecord[]): Promise<ReadIn> {
+async function takeIn(log: OpenLog, records: readonly StoredRecord[]): Promise<ReadIn> {
   let added = 0;
   await log.database.transaction(
     'rw',
@@ -66,8 +68,10 @@ async function addAbsent(log: OpenLog, records: readonly StoredRecord[]): Promis
     async () => {
       for (const record of records) {
         const table = log.database.recordTable(record.type);
-        if (await table.get([record.clubId, record.id])) continue;
-        await table.add(record as never);
+        const known = (await table.get([record.clubId, record.id])) as StoredRecord | undefined;
+        const next = known ? withUnsent(known, record) : record;
+        if (next === known) continue;
+        await table.put(next as never);
         added += 1;
       }
     },
@@ -75,34 +79,25 @@ async function addAbsent(log: OpenLog, records: readonly StoredRecord[]): Promis
   return { kind: 'read', added, known: records.length - added };
 }
 
-function parseFile(text: string): UnsentFile | string {
-  let file: Partial<UnsentFile>;
+type ReadFile = { readonly accountId: string | null; readonly records: readonly StoredRecord[] };
+
+function parseFile(text: string, wholeRecord: (value: unknown) => StoredRecord | null): ReadFile | string {
+  let file: Partial<UnsentFile> | null;
   try {
-    file = JSON.parse(text) as Partial<UnsentFile>;
+    file = JSON.parse(text) as Partial<UnsentFile> | null;
   } catch {
     return 'This is not a whole file of unsent records: it cannot be read as JSON.';
   }
   if (file?.format !== FORMAT) return 'This is not a file of unsent records.';
   if (file.version !== FORMAT_VERSION)
     return 'This file was made by a newer version. Update the application first.';
-  const records: unknown = file.records;
-  if (!Array.isArray(records)) return 'This file holds no list of records.';
-  const broken = records.findIndex((record) => !isStoredRecord(record));
-  if (broken >= 0) return `Record ${broken + 1} of the file is broken; nothing was read in.`;
-  return file as UnsentFile;
-}
-
-function isStoredRecord(value: unknown): value is StoredRecord {
-  const record = value as Partial<StoredRecord> | null;
-  return (
-    typeof record === 'object' &&
-    record !== null &&
-    typeof record.type === 'string' &&
-    isWritableType(record.type) &&
-    typeof record.id === 'string' &&
-    typeof record.clubId === 'string' &&
-    isStamp(record.at) &&
-    typeof record.fields === 'object' &&
-    typeof record.debt?.since === 'number'
-  );
+  const { records: listed, accountId } = file as { records?: unknown; accountId?: unknown };
+  if (!Array.isArray(listed)) return 'This file holds no list of records.';
+  const records: StoredRecord[] = [];
+  for (const value of listed) {
+    const record = wholeRecord(value);
+    if (!record) return `Record ${records.length + 1} of the file is broken; nothing was read in.`;
+    records.push(record);
+  }
+  return { accountId: typeof accountId === 'string' ? accountId : null, records };
 }
